@@ -1,0 +1,46 @@
+import { sql } from 'drizzle-orm'
+import { check, doublePrecision, index, integer, pgTable, text, unique } from 'drizzle-orm/pg-core'
+import { controlKind, controlMoment } from './enums'
+import { sessions } from './sessions'
+
+/** What is read in every session: a tile for stability, a chart white, and a numbered paper for meaning. */
+export const controlSamples = pgTable(
+  'control_samples',
+  {
+    id: integer().primaryKey().generatedAlwaysAsIdentity(),
+    kind: controlKind().notNull(),
+    name: text().notNull(),
+    serial: text().notNull(),
+    /** Backing, storage, brighteners: what one must know to read it again. */
+    note: text().notNull(),
+  },
+  (t) => [unique('control_samples_serial_key').on(t.serial)],
+)
+
+/** Readings of a control at the start and the end of a session. Never changed, never removed (trigger). */
+export const controlReadings = pgTable(
+  'control_readings',
+  {
+    id: integer().primaryKey().generatedAlwaysAsIdentity(),
+    controlSampleId: integer('control_sample_id')
+      .notNull()
+      .references(() => controlSamples.id),
+    sessionId: integer('session_id')
+      .notNull()
+      .references(() => sessions.id),
+    moment: controlMoment().notNull(),
+    ordinal: integer().notNull(),
+    /** CIELAB, D65, 10°. */
+    lStar: doublePrecision('l_star').notNull(),
+    aStar: doublePrecision('a_star').notNull(),
+    bStar: doublePrecision('b_star').notNull(),
+  },
+  (t) => [
+    unique('control_readings_order_key').on(t.sessionId, t.controlSampleId, t.moment, t.ordinal),
+    check(
+      'control_readings_lab_range',
+      sql`${t.lStar} between 0 and 110 and ${t.aStar} between -60 and 60 and ${t.bStar} between -60 and 60`,
+    ),
+    index('control_readings_control_sample_id_idx').on(t.controlSampleId, t.sessionId),
+  ],
+)

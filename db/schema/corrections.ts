@@ -1,0 +1,38 @@
+import { date, index, integer, pgTable, text } from 'drizzle-orm/pg-core'
+import { devices } from './devices'
+import { editions } from './editions'
+
+/** A public note that a published figure was wrong, and what was done. */
+export const corrections = pgTable(
+  'corrections',
+  {
+    id: integer().primaryKey().generatedAlwaysAsIdentity(),
+    deviceId: integer('device_id')
+      .notNull()
+      .references(() => devices.id),
+    notedOn: date('noted_on').notNull(),
+    /** Which figure, in words. */
+    figure: text().notNull(),
+    note: text().notNull(),
+    /** The edition that was wrong, and the one that puts it right; null: not released yet. */
+    wrongIn: integer('wrong_in').references(() => editions.number),
+    rightIn: integer('right_in').references(() => editions.number),
+  },
+  (t) => [index('corrections_device_id_idx').on(t.deviceId, t.notedOn.desc())],
+)
+
+/** A public answer to a correction or a figure: of a maker, an owner, or the team. */
+export const replies = pgTable(
+  'replies',
+  {
+    id: integer().primaryKey().generatedAlwaysAsIdentity(),
+    correctionId: integer('correction_id')
+      .notNull()
+      .references(() => corrections.id),
+    repliedOn: date('replied_on').notNull(),
+    /** Who speaks, as a role. */
+    from: text().notNull(),
+    note: text().notNull(),
+  },
+  (t) => [index('replies_correction_id_idx').on(t.correctionId)],
+)

@@ -1,0 +1,12 @@
+import { integer, pgTable, text, unique } from 'drizzle-orm/pg-core'
+
+/** Those who make reading devices. */
+export const makers = pgTable(
+  'makers',
+  {
+    id: integer().primaryKey().generatedAlwaysAsIdentity(),
+    slug: text().notNull(),
+    name: text().notNull(),
+  },
+  (t) => [unique('makers_slug_key').on(t.slug)],
+)
