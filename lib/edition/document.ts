@@ -1,93 +1,52 @@
-import { type deviceFigures, derivedFigures } from '@/lib/method/figures'
-import type { Edition, EditionDevice, Lab, MeasuredState } from '@/lib/method/types'
+import type { deviceFigures } from '@/lib/method/figures'
+import { derivedFigures } from '@/lib/method/figures'
+import type { EditionDevice, Lab, MeasuredState } from '@/lib/method/types'
 
-/** The number of the method that figures and rankings follow today. */
+/** The method this code works by; an edition names it. */
 export const METHOD_NUMBER = 1
 
-/** What an edition publishes, before its fingerprint is taken. */
-export type EditionDocument = Omit<Edition, 'sha256'>
-
-/** What is known of a device besides its measured figures. */
-export type DeviceFacts = Pick<
+/** What is known of a device besides its colours, as an edition prints it; null is "not stated". */
+export type StatedFacts = Omit<
   EditionDevice,
-  | 'slug'
-  | 'name'
-  | 'maker'
-  | 'revision'
-  | 'frontLight'
-  | 'diagonal'
-  | 'ppi'
-  | 'weight'
-  | 'price'
-  | 'pen'
-  | 'colour'
-  | 'water'
-  | 'pageButtons'
-  | 'onSale'
-  | 'lending'
-  | 'speech'
-  | 'formats'
+  'provisional' | 'units' | 'page' | 'ink' | 'sessions' | 'whiteness' | 'tint' | 'withinLimits' | 'contrast'
 >
 
-/** Decimals published: far below any doubt, so that rounding adds nothing to it. */
-const MEASURED_DECIMALS = 4
+/** Decimals kept of colours and their doubts, and of what is worked out from them: far below any doubt. */
+const COLOUR_DECIMALS = 4
 const DERIVED_DECIMALS = 3
 
 /**
- * A device as an edition publishes it: measured figures to four decimals, and what follows from them to three, worked
- * from the rounded figures so that a reader of the document can work it again.
+ * One device of an edition document. Whiteness, tint and contrast are worked out from the colours as printed, so that
+ * whoever has the document gets the same figures.
  */
-export function editionDevice(facts: DeviceFacts, figures: ReturnType<typeof deviceFigures>): EditionDevice {
-  const page = roundedState(figures.page)
-  const ink = roundedState(figures.ink)
+export function editionDevice(facts: StatedFacts, figures: ReturnType<typeof deviceFigures>): EditionDevice {
+  const page = roundState(figures.page)
+  const ink = roundState(figures.ink)
   const { whiteness, tint, withinLimits, contrast } = derivedFigures(page, ink)
-  const { slug, name, maker, revision, ...rest } = facts
   return {
-    slug,
-    name,
-    maker,
-    revision,
+    ...facts,
     provisional: figures.provisional,
     units: figures.units,
     page,
     ink,
     sessions: figures.sessions,
-    whiteness: rounded(whiteness, DERIVED_DECIMALS),
-    tint: rounded(tint, DERIVED_DECIMALS),
+    whiteness: round(whiteness, DERIVED_DECIMALS),
+    tint: round(tint, DERIVED_DECIMALS),
     withinLimits,
-    contrast: rounded(contrast, DERIVED_DECIMALS),
-    ...rest,
+    contrast: round(contrast, DERIVED_DECIMALS),
   }
 }
 
-/** The document of an edition; devices in the order of their slugs. */
-export function editionDocument(parts: {
-  number: number
-  publishedAt: Date
-  paper: Lab
-  common: Lab
-  session: Lab
-  devices: readonly EditionDevice[]
-}): EditionDocument {
-  return {
-    number: parts.number,
-    publishedAt: parts.publishedAt.toISOString(),
-    method: METHOD_NUMBER,
-    control: { paper: roundedLab(parts.paper) },
-    uncertainty: { common: roundedLab(parts.common), session: roundedLab(parts.session) },
-    devices: [...parts.devices].sort((one, other) => (one.slug < other.slug ? -1 : 1)),
-  }
+export function roundLab({ L, a, b }: Lab): Lab {
+  return { L: round(L, COLOUR_DECIMALS), a: round(a, COLOUR_DECIMALS), b: round(b, COLOUR_DECIMALS) }
 }
 
-function roundedState({ u, ...lab }: MeasuredState): MeasuredState {
-  return { ...roundedLab(lab), u: roundedLab(u) }
+function roundState(state: MeasuredState): MeasuredState {
+  return { ...roundLab(state), u: roundLab(state.u) }
 }
 
-function roundedLab({ L, a, b }: Lab): Lab {
-  return { L: rounded(L, MEASURED_DECIMALS), a: rounded(a, MEASURED_DECIMALS), b: rounded(b, MEASURED_DECIMALS) }
-}
-
-/** To so many decimals; never −0, which JSON can not tell from 0. */
-function rounded(value: number, decimals: number): number {
-  return Number(value.toFixed(decimals)) + 0
+/** Rounded half away from zero to so many decimals; never −0, which JSON would write as 0 and hash as such. */
+function round(value: number, decimals: number): number {
+  const scale = 10 ** decimals
+  return (Math.sign(value) * Math.round(Math.abs(value) * scale)) / scale + 0
 }
