@@ -9,7 +9,7 @@ export const isRoot = process.getuid?.() === 0
  * Without either, names the one line an administrator must run.
  * @returns 'present' or 'installed'
  */
-export async function ensureDebianPackage(name, file) {
+export async function ensureDebianPackage(name, file, sudo = '/usr/bin/sudo') {
   if (existsSync(file)) return 'present'
   if (!existsSync('/usr/bin/apt-get')) {
     throw new Trouble(`${file} is missing, and this is not Debian. Install ${name} and run the command again.`)
@@ -17,9 +17,9 @@ export async function ensureDebianPackage(name, file) {
   const line = `apt-get update && apt-get install -y --no-install-recommends ${name}`
   const env = { DEBIAN_FRONTEND: 'noninteractive' }
   if (isRoot) await run('sh', ['-c', line], { env })
-  else if (await sudoWorks())
-    await run('sudo', ['-n', 'sh', '-c', `DEBIAN_FRONTEND=noninteractive; export DEBIAN_FRONTEND; ${line}`])
-  else if (process.stdin.isTTY && existsSync('/usr/bin/sudo')) await run('sudo', ['sh', '-c', line], { show: true })
+  else if (await needsNoPassword(sudo))
+    await run(sudo, ['-n', 'sh', '-c', `DEBIAN_FRONTEND=noninteractive; export DEBIAN_FRONTEND; ${line}`])
+  else if (process.stdin.isTTY && existsSync(sudo)) await run(sudo, ['sh', '-c', line], { show: true })
   else
     throw new Trouble(
       `${name} is not installed, and this user may not install it. An administrator must run:\n  ${line}`,
@@ -28,9 +28,9 @@ export async function ensureDebianPackage(name, file) {
   return 'installed'
 }
 
-async function sudoWorks() {
-  if (!existsSync('/usr/bin/sudo')) return false
-  return run('sudo', ['-n', 'true']).then(
+async function needsNoPassword(sudo) {
+  if (!existsSync(sudo)) return false
+  return run(sudo, ['-n', 'true']).then(
     () => true,
     () => false,
   )
