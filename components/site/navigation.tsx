@@ -1,0 +1,51 @@
+'use client'
+
+import Link from 'next/link'
+import { usePathname } from 'next/navigation'
+import { isIn, ROOMS } from './rooms'
+
+/** The rooms in a line; the one we are in is marked, by the server too, so it needs no JavaScript. */
+export function WideNavigation() {
+  const pathname = usePathname()
+  return (
+    <nav aria-label="Main" className="hidden gap-6 self-stretch text-small sm:flex">
+      {ROOMS.map((room) => (
+        <Link
+          key={room.href}
+          href={room.href}
+          aria-current={isIn(room, pathname) ? 'page' : undefined}
+          className="flex items-center border-y-3 border-transparent text-ink no-underline hover:underline aria-[current]:border-b-shade aria-[current]:font-semibold"
+        >
+          {room.name}
+        </Link>
+      ))}
+    </nav>
+  )
+}
+
+/** The same behind a button on a phone. Going to another page closes it: `key` makes a new, closed one. */
+export function PhoneNavigation() {
+  const pathname = usePathname()
+  return (
+    <details key={pathname} className="group/menu ml-auto sm:hidden">
+      <summary className="flex min-h-11 cursor-pointer list-none items-center rounded-card border border-edge px-4 font-semibold group-open/menu:bg-tint [&::-webkit-details-marker]:hidden">
+        Menu
+      </summary>
+      <nav
+        aria-label="Main"
+        className="absolute inset-x-0 top-full z-20 grid border-y border-rule bg-sheet px-4 py-2 text-lead"
+      >
+        {ROOMS.map((room) => (
+          <Link
+            key={room.href}
+            href={room.href}
+            aria-current={isIn(room, pathname) ? 'page' : undefined}
+            className="flex min-h-12 items-center border-l-3 border-transparent pl-3 text-ink no-underline hover:underline aria-[current]:border-shade aria-[current]:font-semibold"
+          >
+            {room.name}
+          </Link>
+        ))}
+      </nav>
+    </details>
+  )
+}
