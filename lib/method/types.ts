@@ -131,31 +131,36 @@ export type Answers = {
   limits: Limits
 }
 
-export type RankedDevice = {
+/** A device's fit to one reader, without the doubt that only draws can give. */
+export type ScoredDevice = {
   slug: string
   /** 0–100. */
   fit: number
-  /** Standard deviation of the fit over the draws (n − 1). */
-  sd: number
   /** Each 0–1. */
   scores: Record<Aim, number>
   /** Points of the fit that each aim brings; they sum to `fit`. */
   contributions: Record<Aim, number>
   /** Share of hours in which nothing can be read on this device, 0–1. */
   unreadable: number
+  /** Fields that were not stated and mattered: for a term of the score or for a limit. */
+  notStated: string[]
+}
+
+export type RankedDevice = ScoredDevice & {
+  /** Standard deviation of the fit over the draws (n − 1). */
+  sd: number
   /** Share of draws in first place, shared equally among those level. */
   first: number
   /** 95 % rank interval. */
   rank95: [number, number]
   /** Every device too close to call with this one, in ranked order. */
   tiedWith: string[]
-  /** Fields that were not stated and mattered: for a term of the score or for a limit. */
-  notStated: string[]
 }
 
 export type NearMiss = {
   slug: string
-  limit: Limit /** How far off, in the limit's unit; null where it is not a number. */
+  limit: Limit
+  /** How far off, in the limit's unit; null where it is not a number. */
   by: number | null
 }
 

@@ -1,0 +1,105 @@
+import { METHOD } from './constants'
+import { clarityScore, tintScore, whitenessScore } from './criteria'
+import { type Prepared, surfaceOf } from './fit'
+import { handlingScore } from './handling'
+import { clamp } from './light'
+import { byFit } from './order'
+import { fluency, reserveIn, SPOT_READING } from './reserve'
+import type { EditionDevice, WouldChange } from './types'
+import { TOUCHING } from './weight-reversal'
+import { type ByAim, finalWeights, lightMultipliers } from './weights'
+
+/** What a device brings to each spot, hours apart, and its scores that no hour changes. */
+type InSpots = { slug: string; gain: number[]; unreadable: number[]; whiteness: number; tint: number; handling: number }
+
+/** Hours moved between two of the prepared spots. */
+type Move = { from: number; to: number; hours: number }
+
+/**
+ * The fewest hours, in steps of one half, moved from one spot to another that put a device strictly ahead of the one
+ * in first place. The aims' multipliers follow the hours. Of moves of the same hours the first counts: by the spot they
+ * leave, then by the one they go to, in the request's order. No spot is given more than a week has.
+ * @param devices in ranked order
+ * @returns indexes into the request's spots; null where no move does it
+ */
+export function changeByHours(prepared: Prepared, devices: readonly EditionDevice[]): WouldChange['hours'] {
+  const { spots } = prepared
+  if (devices.length < 2 || spots.length < 2) return null
+  const all = devices.map((device) => inSpots(device, prepared))
+  const leader = all[0]!
+  const rivals = undominated(all).slice(1)
+  if (rivals.length === 0) return null
+
+  const step = METHOD.changes.hourStep.value
+  const most = Math.max(...spots.map((spot) => spot.hours))
+  for (let hours = step; hours <= most; hours += step) {
+    for (let from = 0; from < spots.length; from++) {
+      if (spots[from]!.hours < hours) continue
+      for (let to = 0; to < spots.length; to++) {
+        if (to === from || spots[to]!.hours + hours > METHOD.light.mostHours.value) continue
+        const fitOf = fitAfter(prepared, { from, to, hours })
+        const toBeat = fitOf(leader) + TOUCHING
+        if (!rivals.some((rival) => fitOf(rival) > toBeat)) continue
+        const [first] = all.map((device) => ({ slug: device.slug, fit: fitOf(device) })).sort(byFit)
+        return { from: spots[from]!.index, to: spots[to]!.index, hours, first: first!.slug }
+      }
+    }
+  }
+  return null
+}
+
+function inSpots(device: EditionDevice, { spots, eye, white, handling }: Prepared): InSpots {
+  const surface = surfaceOf(device)
+  const reserves = spots.map((spot) => reserveIn(surface, spot, eye))
+  return {
+    slug: device.slug,
+    gain: spots.map((spot, s) => fluency(reserves[s]!) - spot.rhoDim),
+    unreadable: reserves.map((reserve) => (reserve < SPOT_READING ? 1 : 0)),
+    whiteness: whitenessScore(device.page, white),
+    tint: tintScore(device.page, white),
+    handling: handlingScore(device, handling).score,
+  }
+}
+
+/** The first, and every one that none before it equals or betters in all respects: the others can never be ahead. */
+function undominated(all: readonly InSpots[]): InSpots[] {
+  const kept: InSpots[] = []
+  for (const device of all) if (!kept.some((better) => dominates(better, device))) kept.push(device)
+  return kept
+}
+
+function dominates(one: InSpots, other: InSpots): boolean {
+  return (
+    one.whiteness >= other.whiteness &&
+    one.tint >= other.tint &&
+    one.handling >= other.handling &&
+    one.gain.every((gain, s) => gain >= other.gain[s]!) &&
+    one.unreadable.every((unreadable, s) => unreadable <= other.unreadable[s]!)
+  )
+}
+
+/** Fits after a move. All spots but two keep their hours, so each sum is the old one and one difference. */
+function fitAfter(prepared: Prepared, { from, to, hours }: Move): (device: InSpots) => number {
+  const { spots, claritySpan, byHand, aims } = prepared
+  const [left, entered] = [spots[from]!, spots[to]!]
+  const moved = hours * (left.share / left.hours)
+  const mean = (values: number[]) =>
+    values.reduce((sum, value, s) => sum + spots[s]!.share * value, 0) + moved * (values[to]! - values[from]!)
+  const span = claritySpan + moved * (entered.rhoBright - entered.rhoDim - (left.rhoBright - left.rhoDim))
+  const weights: ByAim = byHand
+    ? aims
+    : finalWeights(
+        aims,
+        lightMultipliers({
+          gain: mean(spots.map((spot) => spot.pull.gain)),
+          colourfulness: mean(spots.map((spot) => spot.pull.colourfulness)),
+        }),
+      )
+  return ({ gain, unreadable, whiteness, tint, handling }) =>
+    100 *
+    (1 - clamp(mean(unreadable))) *
+    (weights.clarity * clarityScore(mean(gain), span) +
+      weights.whiteness * whiteness +
+      weights.tint * tint +
+      weights.handling * handling)
+}
