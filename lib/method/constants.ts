@@ -178,6 +178,12 @@ const TIES = {
 const CHANGES = {
   manyLimits: house('Limits above which we warn', 3),
   fewDevices: house('Devices left below which we warn', 3),
+  touching: house(
+    'Lead in points, or stretch of weights, that counts as level',
+    1e-9,
+    undefined,
+    'Rounding: to touch is not to overtake.',
+  ),
   hourStep: house('Step in which hours are moved between spots', 0.5, 'h'),
 }
 

@@ -1,6 +1,6 @@
 import { METHOD } from './constants'
 import { clarityScore, tintScore, whitenessScore } from './criteria'
-import { type Prepared, surfaceOf } from './fit'
+import { type Prepared, type PreparedSpot, surfaceOf } from './fit'
 import { handlingScore } from './handling'
 import { clamp } from './light'
 import { byFit } from './order'
@@ -9,8 +9,11 @@ import type { EditionDevice, WouldChange } from './types'
 import { TOUCHING } from './weight-reversal'
 import { type ByAim, finalWeights, lightMultipliers } from './weights'
 
-/** What a device brings to each spot, hours apart, and its scores that no hour changes. */
-type InSpots = { slug: string; gain: number[]; unreadable: number[]; whiteness: number; tint: number; handling: number }
+/** A value in each spot, and its mean over the hours as they are. */
+type BySpot = { inSpot: number[]; mean: number }
+
+/** What a device brings to each spot, and its scores that no hour changes. */
+type InSpots = { slug: string; gain: BySpot; unreadable: BySpot; whiteness: number; tint: number; handling: number }
 
 /** Hours moved between two of the prepared spots. */
 type Move = { from: number; to: number; hours: number }
@@ -30,6 +33,7 @@ export function changeByHours(prepared: Prepared, devices: readonly EditionDevic
   const rivals = undominated(all).slice(1)
   if (rivals.length === 0) return null
 
+  const light = lightOf(prepared)
   const step = METHOD.changes.hourStep.value
   const most = Math.max(...spots.map((spot) => spot.hours))
   for (let hours = step; hours <= most; hours += step) {
@@ -37,7 +41,7 @@ export function changeByHours(prepared: Prepared, devices: readonly EditionDevic
       if (spots[from]!.hours < hours) continue
       for (let to = 0; to < spots.length; to++) {
         if (to === from || spots[to]!.hours + hours > METHOD.light.mostHours.value) continue
-        const fitOf = fitAfter(prepared, { from, to, hours })
+        const fitOf = fitAfter(prepared, light, { from, to, hours })
         const toBeat = fitOf(leader) + TOUCHING
         if (!rivals.some((rival) => fitOf(rival) > toBeat)) continue
         const [first] = all.map((device) => ({ slug: device.slug, fit: fitOf(device) })).sort(byFit)
@@ -53,8 +57,8 @@ function inSpots(device: EditionDevice, { spots, eye, white, handling }: Prepare
   const reserves = spots.map((spot) => reserveIn(surface, spot, eye))
   return {
     slug: device.slug,
-    gain: spots.map((spot, s) => fluency(reserves[s]!) - spot.rhoDim),
-    unreadable: reserves.map((reserve) => (reserve < SPOT_READING ? 1 : 0)),
+    gain: bySpot(spots, (spot, s) => fluency(reserves[s]!) - spot.rhoDim),
+    unreadable: bySpot(spots, (_, s) => (reserves[s]! < SPOT_READING ? 1 : 0)),
     whiteness: whitenessScore(device.page, white),
     tint: tintScore(device.page, white),
     handling: handlingScore(device, handling).score,
@@ -73,32 +77,43 @@ function dominates(one: InSpots, other: InSpots): boolean {
     one.whiteness >= other.whiteness &&
     one.tint >= other.tint &&
     one.handling >= other.handling &&
-    one.gain.every((gain, s) => gain >= other.gain[s]!) &&
-    one.unreadable.every((unreadable, s) => unreadable <= other.unreadable[s]!)
+    one.gain.inSpot.every((gain, s) => gain >= other.gain.inSpot[s]!) &&
+    one.unreadable.inSpot.every((unreadable, s) => unreadable <= other.unreadable.inSpot[s]!)
   )
 }
 
-/** Fits after a move. All spots but two keep their hours, so each sum is the old one and one difference. */
-function fitAfter(prepared: Prepared, { from, to, hours }: Move): (device: InSpots) => number {
-  const { spots, claritySpan, byHand, aims } = prepared
-  const [left, entered] = [spots[from]!, spots[to]!]
-  const moved = hours * (left.share / left.hours)
-  const mean = (values: number[]) =>
-    values.reduce((sum, value, s) => sum + spots[s]!.share * value, 0) + moved * (values[to]! - values[from]!)
-  const span = claritySpan + moved * (entered.rhoBright - entered.rhoDim - (left.rhoBright - left.rhoDim))
+function bySpot(spots: readonly PreparedSpot[], value: (spot: PreparedSpot, s: number) => number): BySpot {
+  const inSpot = spots.map(value)
+  return { inSpot, mean: inSpot.reduce((sum, one, s) => sum + spots[s]!.share * one, 0) }
+}
+
+/** What a reader's spots bring to the scale of clarity and to the weights. */
+type Light = { span: BySpot; gain: BySpot; colourfulness: BySpot }
+
+function lightOf({ spots }: Prepared): Light {
+  return {
+    span: bySpot(spots, (spot) => spot.rhoBright - spot.rhoDim),
+    gain: bySpot(spots, (spot) => spot.pull.gain),
+    colourfulness: bySpot(spots, (spot) => spot.pull.colourfulness),
+  }
+}
+
+/** Fits after a move. All spots but two keep their hours, so each mean is the old one and one difference. */
+function fitAfter(
+  { spots, byHand, aims }: Prepared,
+  light: Light,
+  { from, to, hours }: Move,
+): (device: InSpots) => number {
+  const share = hours * (spots[from]!.share / spots[from]!.hours)
+  const after = ({ inSpot, mean }: BySpot) => mean + share * (inSpot[to]! - inSpot[from]!)
+  const span = after(light.span)
   const weights: ByAim = byHand
     ? aims
-    : finalWeights(
-        aims,
-        lightMultipliers({
-          gain: mean(spots.map((spot) => spot.pull.gain)),
-          colourfulness: mean(spots.map((spot) => spot.pull.colourfulness)),
-        }),
-      )
+    : finalWeights(aims, lightMultipliers({ gain: after(light.gain), colourfulness: after(light.colourfulness) }))
   return ({ gain, unreadable, whiteness, tint, handling }) =>
     100 *
-    (1 - clamp(mean(unreadable))) *
-    (weights.clarity * clarityScore(mean(gain), span) +
+    (1 - clamp(after(unreadable))) *
+    (weights.clarity * clarityScore(after(gain), span) +
       weights.whiteness * whiteness +
       weights.tint * tint +
       weights.handling * handling)

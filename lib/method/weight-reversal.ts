@@ -1,5 +1,7 @@
+import { METHOD } from './constants'
+
 /** Below this, in points of fit and in weight, a lead or a stretch of weights is rounding: they touch, none overtakes. */
-export const TOUCHING = 1e-9
+export const TOUCHING = METHOD.changes.touching.value
 
 /**
  * The nearest value of one weight beyond which the option `runner` is ahead of the option `leader` and nobody is ahead

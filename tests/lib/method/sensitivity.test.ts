@@ -110,6 +110,23 @@ describe('hours that would change first place', () => {
     )
   })
 
+  test('count for a device that is better in one respect alone, once the light lets that respect count', () => {
+    const u = { L: 0, a: 0, b: 0 }
+    const lighter = makeDevice({ slug: 'lighter', frontLight: false, page: { L: 74, a: -2.6, b: 1, u } })
+    const purer = makeDevice({ slug: 'purer', frontLight: false, page: { L: 69, a: -0.6, b: 1, u } })
+    const spots = [
+      { lux: 2, hours: 7, frontLight: false },
+      { lux: 4000, hours: 1, frontLight: false },
+    ]
+    const answers = makeAnswers({ spots })
+    const [first, second] = rankByFit(makeEdition([lighter, purer]), answers).ranked
+    expect(first!.slug).toBe('lighter')
+    expect(AIMS.filter((aim) => second!.scores[aim] > first!.scores[aim])).toEqual(['tint'])
+    const change = changeOf(makeEdition([lighter, purer]), answers)
+    expect(change).toMatchObject({ from: 0, to: 1, first: 'purer' })
+    expect(change).toEqual(changeByTrying(makeEdition([lighter, purer]), answers))
+  })
+
   test('none where there is one spot, or one device', () => {
     const one = makeAnswers({ spots: [{ lux: 80, hours: 5, frontLight: true }] })
     expect(changeOf(syntheticEdition(5), one)).toBeNull()
