@@ -26,6 +26,8 @@ export async function migrateDatabase(url: string): Promise<{ applied: number; f
   const client = postgres(url, { max: 1, connect_timeout: 10, onnotice: () => {} })
   try {
     await client`select pg_advisory_lock(${LOCK})`
+    // Writers must not queue for long behind a change of a table: better to fail here and be tried again.
+    await client`set lock_timeout = '2s'`
     // Writers must not queue for long behind a change of a table: better to fail and be tried again.
     await client`set lock_timeout = '2s'`
     const before = await countApplied(client)

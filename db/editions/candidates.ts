@@ -1,10 +1,9 @@
-import { and, asc, eq, lte, ne } from 'drizzle-orm'
+import { and, asc, eq, ne, sql } from 'drizzle-orm'
+import { METHOD } from '@/lib/method/constants'
 import type { SetReadings } from '@/lib/method/figures'
 import type { Db } from '../client'
 import { devices, makers, readings, revisions, sessions, sets, units } from '../schema'
-
-/** Readings a set needs at least before it counts (common practice, no published source). */
-export const LEAST_READINGS = 5
+import { sessionCounts } from './session-counts'
 
 /** A revision that can stand in an edition, with the sets its figures rest on. */
 export type Candidate = {
@@ -19,9 +18,10 @@ export type Candidate = {
 }
 
 /**
- * The revisions an edition of this moment may print, by slug: of each device the newest with counting sets of both
- * states. A set counts that was measured at d/8°, specular included, D65, 10°, front light off, with five accepted
- * readings or more, in a session ended before, and that had not been withdrawn by then.
+ * The revisions an edition of this moment may print, in the order of their slugs: of each device the newest with
+ * counting sets of both states; one whose first day is not known counts as the oldest. A set counts that was measured
+ * at d/8°, specular included, D65, 10°, front light off, with five accepted readings or more, in a session ended before,
+ * and that had not been withdrawn by then.
  */
 export async function listCandidates(db: Db, at: Date): Promise<Candidate[]> {
   const rows = await db
@@ -51,18 +51,15 @@ export async function listCandidates(db: Db, at: Date): Promise<Candidate[]> {
     .innerJoin(devices, eq(devices.id, revisions.deviceId))
     .innerJoin(makers, eq(makers.id, devices.makerId))
     .where(
-      and(
-        ne(readings.flag, 'left-out'),
-        eq(sets.specular, 'included'),
-        eq(sets.lightOff, true),
-        eq(sessions.specular, 'included'),
-        eq(sessions.geometry, 'd/8'),
-        eq(sessions.illuminant, 'D65'),
-        eq(sessions.observer, '10'),
-        lte(sessions.endedAt, at),
-      ),
+      and(ne(readings.flag, 'left-out'), eq(sets.specular, 'included'), eq(sets.lightOff, true), sessionCounts(at)),
     )
-    .orderBy(asc(devices.slug), asc(revisions.since), asc(revisions.id), asc(sets.id), asc(readings.ordinal))
+    .orderBy(
+      asc(devices.slug),
+      sql`${revisions.since} asc nulls first`,
+      asc(revisions.id),
+      asc(sets.id),
+      asc(readings.ordinal),
+    )
 
   const byRevision = new Map<number, Candidate & { bySet: Map<number, SetReadings> }>()
   for (const row of rows) {
@@ -82,16 +79,17 @@ export async function listCandidates(db: Db, at: Date): Promise<Candidate[]> {
     set.readings.push({ L: row.L, a: row.a, b: row.b })
   }
 
-  // Rows come oldest revision first, so that a newer one with figures takes the older one's place.
+  // Rows come oldest revision first, so that a newer one with figures takes the older one's place. The order of slugs
+  // is made here: the database's own may ignore hyphens.
   const newest = new Map<string, Candidate>()
   for (const { bySet, ...candidate } of byRevision.values()) {
     for (const [id, set] of bySet) {
-      if (set.readings.length < LEAST_READINGS) continue
+      if (set.readings.length < METHOD.figures.leastReadings.value) continue
       candidate.sets.push(set)
       candidate.setIds.push(id)
     }
     const states = new Set(candidate.sets.map((set) => set.state))
     if (states.size === 2) newest.set(candidate.slug, candidate)
   }
-  return [...newest.values()]
+  return [...newest.values()].sort((one, other) => (one.slug < other.slug ? -1 : 1))
 }

@@ -4,7 +4,19 @@ import { documentHash } from '@/lib/edition/seal'
 import { deviceFigures, pooledComponents } from '@/lib/method/figures'
 import type { Edition } from '@/lib/method/types'
 import type { Db } from '../client'
-import { editionEntries, editions } from '../schema'
+import {
+  controlReadings,
+  editionEntries,
+  editions,
+  frontLightMeasurements,
+  prices,
+  readings,
+  revisions,
+  sessions,
+  sets,
+  specs,
+  units,
+} from '../schema'
 import { listCandidates } from './candidates'
 import { commonUncertainty, controlPaper, sessionUncertainty } from './controls'
 import { statedFacts } from './facts'
@@ -27,7 +39,13 @@ export type Cut = {
  */
 export function cutEdition(db: Db, { publishedAt, title, note }: Cut): Promise<Edition> {
   return db.transaction(async (tx) => {
+    // Cuts asked for at once wait for each other; what is measured or written meanwhile waits for this one.
+    await tx.execute(sql`set local lock_timeout = '60s'`)
+    await tx.execute(sql`set local statement_timeout = '60s'`)
     await tx.execute(sql`select pg_advisory_xact_lock(${LOCK})`)
+    await tx.execute(
+      sql`lock table ${readings}, ${controlReadings}, ${sets}, ${sessions}, ${units}, ${revisions}, ${specs}, ${prices}, ${frontLightMeasurements} in share mode`,
+    )
     const [last] = await tx.select({ number: sql<number>`coalesce(max(${editions.number}), 0)::int` }).from(editions)
     const candidates = await listCandidates(tx, publishedAt)
     if (candidates.length === 0) throw new Error('No device has sets of page and ink that count; there is no edition')
@@ -53,17 +71,15 @@ export function cutEdition(db: Db, { publishedAt, title, note }: Cut): Promise<E
     const document: Edition = { ...unsealed, sha256: documentHash(unsealed) }
     const { number, method, sha256 } = document
     await tx.insert(editions).values({ number, publishedAt, method, title, note, sha256, document, components })
-    await tx
-      .insert(editionEntries)
-      .values(
-        entries.map(({ device, revisionId, setIds }) => ({
-          edition: number,
-          slug: device.slug,
-          device,
-          revisionId,
-          setIds,
-        })),
-      )
+    await tx.insert(editionEntries).values(
+      entries.map(({ device, revisionId, setIds }) => ({
+        edition: number,
+        slug: device.slug,
+        device,
+        revisionId,
+        setIds,
+      })),
+    )
     return document
   })
 }

@@ -1,4 +1,5 @@
-import { date, index, integer, pgTable, text } from 'drizzle-orm/pg-core'
+import { sql } from 'drizzle-orm'
+import { check, date, index, integer, pgTable, text } from 'drizzle-orm/pg-core'
 import { devices } from './devices'
 import { editions } from './editions'
 
@@ -18,21 +19,9 @@ export const corrections = pgTable(
     wrongIn: integer('wrong_in').references(() => editions.number),
     rightIn: integer('right_in').references(() => editions.number),
   },
-  (t) => [index('corrections_device_id_idx').on(t.deviceId, t.notedOn.desc())],
-)
-
-/** A public answer to a correction or a figure: of a maker, an owner, or the team. */
-export const replies = pgTable(
-  'replies',
-  {
-    id: integer().primaryKey().generatedAlwaysAsIdentity(),
-    correctionId: integer('correction_id')
-      .notNull()
-      .references(() => corrections.id),
-    repliedOn: date('replied_on').notNull(),
-    /** Who speaks, as a role. */
-    from: text().notNull(),
-    note: text().notNull(),
-  },
-  (t) => [index('replies_correction_id_idx').on(t.correctionId)],
+  (t) => [
+    check('corrections_put_right_later', sql`${t.rightIn} > ${t.wrongIn}`),
+    check('corrections_note_said', sql`btrim(${t.note}) <> ''`),
+    index('corrections_device_id_idx').on(t.deviceId, t.notedOn.desc()),
+  ],
 )

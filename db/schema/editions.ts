@@ -1,8 +1,7 @@
 import { sql } from 'drizzle-orm'
-import { check, integer, jsonb, pgTable, primaryKey, text, timestamp, unique } from 'drizzle-orm/pg-core'
+import { check, integer, jsonb, pgTable, text, timestamp, unique } from 'drizzle-orm/pg-core'
 import type { Components } from '@/lib/method/figures'
-import type { Edition, EditionDevice } from '@/lib/method/types'
-import { revisions } from './revisions'
+import type { Edition } from '@/lib/method/types'
 
 /** A released edition. The row exists from its release on and never changes (trigger); numbers have no gaps. */
 export const editions = pgTable(
@@ -25,26 +24,9 @@ export const editions = pgTable(
     unique('editions_sha256_key').on(t.sha256),
     check('editions_number_from_one', sql`${t.number} >= 1`),
     check('editions_sha256_form', sql`${t.sha256} ~ '^[0-9a-f]{64}$'`),
-  ],
-)
-
-/** What an edition froze of one device, and the sets it was computed from. Never changes (trigger). */
-export const editionEntries = pgTable(
-  'edition_entries',
-  {
-    edition: integer()
-      .notNull()
-      .references(() => editions.number),
-    revisionId: integer('revision_id')
-      .notNull()
-      .references(() => revisions.id),
-    slug: text().notNull(),
-    /** Figures, doubts and session shares as in the document. */
-    device: jsonb().$type<EditionDevice>().notNull(),
-    setIds: integer('set_ids').array().notNull(),
-  },
-  (t) => [
-    primaryKey({ name: 'edition_entries_pkey', columns: [t.edition, t.slug] }),
-    check('edition_entries_from_sets', sql`cardinality(${t.setIds}) > 0`),
+    check(
+      'editions_document_agrees',
+      sql`((${t.document} ->> 'number')::int, (${t.document} ->> 'method')::int, ${t.document} ->> 'sha256', (${t.document} ->> 'publishedAt')::timestamptz) is not distinct from (${t.number}, ${t.method}, ${t.sha256}, ${t.publishedAt})`,
+    ),
   ],
 )

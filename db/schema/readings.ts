@@ -21,7 +21,7 @@ export const readings = pgTable(
     /** Radiance factor, 0–1, 400–700 nm every 10 nm; null: the instrument stores none. */
     spectrum: real().array(),
     flag: readingFlag().notNull().default('none'),
-    /** Why it is flagged or left out; null where it is neither. */
+    /** Why it is flagged, left out, or cleared again; null: never flagged. */
     flagReason: text('flag_reason'),
   },
   (t) => [
@@ -31,7 +31,8 @@ export const readings = pgTable(
       sql`${t.lStar} between 0 and 100 and ${t.aStar} between -60 and 60 and ${t.bStar} between -60 and 60`,
     ),
     check('readings_instrument_whiteness_range', sql`${t.instrumentWhiteness} between -500 and 500`),
-    check('readings_flag_with_reason', sql`(${t.flag} = 'none') = (${t.flagReason} is null)`),
+    check('readings_flag_with_reason', sql`${t.flag} = 'none' or ${t.flagReason} is not null`),
+    check('readings_flag_reason_said', sql`btrim(${t.flagReason}) <> ''`),
     check(
       'readings_spectrum_form',
       sql`${t.spectrum} is null or (cardinality(${t.spectrum}) = 31 and array_position(${t.spectrum}, null) is null and 0 <= all(${t.spectrum}) and 2 >= all(${t.spectrum}))`,

@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm'
-import { boolean, check, index, integer, pgTable, text, timestamp } from 'drizzle-orm/pg-core'
+import { boolean, check, index, integer, pgTable, text, timestamp, unique } from 'drizzle-orm/pg-core'
 import { specularMode, state } from './enums'
 import { sessions } from './sessions'
 import { units } from './units'
@@ -29,7 +29,11 @@ export const sets = pgTable(
   },
   (t) => [
     check('sets_withdrawn_with_reason', sql`(${t.withdrawnAt} is null) = (${t.withdrawnReason} is null)`),
+    check('sets_withdrawn_reason_said', sql`btrim(${t.withdrawnReason}) <> ''`),
+    check('sets_position_said', sql`btrim(${t.position}) <> ''`),
+    check('sets_shown_said', sql`btrim(${t.shown}) <> ''`),
+    // More readings of the same place in the same session belong to the same set.
+    unique('sets_place_key').on(t.sessionId, t.unitId, t.position, t.state, t.specular),
     index('sets_unit_id_idx').on(t.unitId, t.state),
-    index('sets_session_id_idx').on(t.sessionId),
   ],
 )

@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm'
-import { check, date, doublePrecision, index, integer, pgTable, text } from 'drizzle-orm/pg-core'
+import { check, date, doublePrecision, integer, pgTable, text, unique } from 'drizzle-orm/pg-core'
 import { stated } from './enums'
 import { revisions } from './revisions'
 
@@ -48,7 +48,16 @@ export const specs = pgTable(
       sql`(${t.field} in ('diagonal', 'ppi', 'weight', 'water') and ${t.stated} = 'yes') = (${t.value} is not null)`,
     ),
     check('specs_list_where_formats', sql`(${t.field} = 'formats' and ${t.stated} = 'yes') = (${t.list} is not null)`),
-    check('specs_value_range', sql`${t.value} between 0 and 5000`),
-    index('specs_revision_id_field_idx').on(t.revisionId, t.field, t.statedOn.desc()),
+    check('specs_diagonal_range', sql`${t.field} <> 'diagonal' or ${t.value} between 1 and 50`),
+    check('specs_ppi_range', sql`${t.field} <> 'ppi' or ${t.value} between 10 and 2000`),
+    check('specs_weight_range', sql`${t.field} <> 'weight' or ${t.value} between 10 and 5000`),
+    check('specs_water_digit', sql`${t.field} <> 'water' or ${t.value} in (0, 1, 2, 3, 4, 5, 6, 7, 8, 9)`),
+    check(
+      'specs_list_filled',
+      sql`${t.list} is null or (cardinality(${t.list}) > 0 and array_position(${t.list}, null) is null)`,
+    ),
+    check('specs_source_said', sql`btrim(${t.source}) <> ''`),
+    // The newest statement of a field counts, so two of one day would leave it open which.
+    unique('specs_statement_key').on(t.revisionId, t.field, t.statedOn),
   ],
 )

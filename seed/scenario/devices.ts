@@ -28,8 +28,6 @@ export type ScenarioDevice = {
   lending: boolean | null
   speech: boolean | null
   formats: string[] | null
-  /** The edition it first stands in. */
-  first: 1 | 2 | 3
 }
 
 const lab = (L: number, a: number, b: number): Lab => ({ L, a, b })
@@ -71,35 +69,33 @@ export const DEVICES: ScenarioDevice[] = [
     lending: true,
     speech: false,
     formats: BOOKS,
-    first: 1,
   },
   {
     slug: 'ostler-plain-7',
     name: 'Ostler Plain 7',
     maker: 'Ostler',
-    note: 'A light, nearly untinted page in a size most novels suit.',
-    revisions: [{ name: 'A', since: '2025-06-01', page: lab(73.3, -1.3, 0.9), ink: lab(22.9, -0.3, -0.9), units: 2 }],
+    note: 'No front light, and so no light guide over the page: the lightest and least tinted of its size.',
+    revisions: [{ name: 'A', since: '2025-06-01', page: lab(74.4, -0.9, 0.3), ink: lab(24.0, -0.3, -0.9), units: 2 }],
     diagonal: 7,
     ppi: 300,
-    weight: 205,
-    prices: [{ amount: 18900, on: '2026-01-20' }],
+    weight: 186,
+    prices: [{ amount: 15900, on: '2026-01-20' }],
     pen: false,
     colour: false,
-    frontLight: { max: 104, min: 0.5, evenness: 81, coolest: 6300, warmest: 2400 },
+    frontLight: null,
     water: 7,
     pageButtons: true,
     onSale: true,
     lending: true,
     speech: false,
     formats: BOOKS,
-    first: 1,
   },
   {
     slug: 'tamber-reed-7',
     name: 'Tamber Reed 7',
     maker: 'Tamber',
     note: 'A page a shade cooler than most, which the whiteness formula likes more than the eye does.',
-    revisions: [{ name: 'A', since: '2025-05-10', page: lab(73.0, -1.4, 0.3), ink: lab(22.6, -0.5, -1), units: 2 }],
+    revisions: [{ name: 'A', since: '2025-05-10', page: lab(73.0, -1.4, -0.4), ink: lab(21.8, -0.5, -1), units: 2 }],
     diagonal: 7,
     ppi: 300,
     weight: 208,
@@ -116,7 +112,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: true,
     speech: true,
     formats: MANY,
-    first: 1,
   },
   {
     slug: 'tamber-reed-7-colour',
@@ -137,7 +132,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: true,
     speech: true,
     formats: MANY,
-    first: 1,
   },
   {
     slug: 'wexby-vesper-6',
@@ -158,7 +152,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: false,
     speech: false,
     formats: BOOKS,
-    first: 1,
   },
   {
     slug: 'wexby-vesper-8',
@@ -179,7 +172,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: false,
     speech: false,
     formats: BOOKS,
-    first: 2,
   },
   {
     slug: 'quayle-margin-10',
@@ -200,7 +192,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: false,
     speech: false,
     formats: ['EPUB', 'PDF'],
-    first: 1,
   },
   {
     slug: 'quayle-margin-13',
@@ -221,7 +212,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: false,
     speech: false,
     formats: ['EPUB', 'PDF'],
-    first: 1,
   },
   {
     slug: 'corrin-quarto-10-colour',
@@ -242,7 +232,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: true,
     speech: true,
     formats: MANY,
-    first: 1,
   },
   {
     slug: 'corrin-octavo-8',
@@ -263,18 +252,20 @@ export const DEVICES: ScenarioDevice[] = [
     lending: true,
     speech: true,
     formats: MANY,
-    first: 2,
   },
   {
     slug: 'haldon-copybook-10',
     name: 'Haldon Copybook 10',
     maker: 'Haldon',
     note: 'The page with the least tint, made for writing on. No front light.',
-    revisions: [{ name: 'A', since: '2025-08-20', page: lab(74, -0.3, 0.9), ink: lab(26.1, -0.2, -0.2), units: 2 }],
+    revisions: [{ name: 'A', since: '2025-08-20', page: lab(74, -0.3, 0.5), ink: lab(26.1, -0.2, -0.2), units: 2 }],
     diagonal: 10.3,
     ppi: 227,
     weight: 358,
-    prices: [{ amount: 36900, on: '2026-02-02' }],
+    prices: [
+      { amount: 36900, on: '2026-02-02' },
+      { amount: 29900, on: '2026-10-30' },
+    ],
     pen: true,
     colour: false,
     frontLight: null,
@@ -284,7 +275,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: false,
     speech: null,
     formats: ['EPUB', 'PDF'],
-    first: 1,
   },
   {
     slug: 'haldon-copybook-10-colour',
@@ -305,7 +295,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: false,
     speech: null,
     formats: ['EPUB', 'PDF', 'CBZ'],
-    first: 2,
   },
   {
     slug: 'pellow-wayside-5',
@@ -326,7 +315,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: true,
     speech: false,
     formats: BOOKS,
-    first: 1,
   },
   {
     slug: 'pellow-broadsheet-13-colour',
@@ -347,7 +335,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: false,
     speech: false,
     formats: MANY,
-    first: 3,
   },
   {
     slug: 'tamber-almanac-6',
@@ -368,7 +355,6 @@ export const DEVICES: ScenarioDevice[] = [
     lending: true,
     speech: false,
     formats: BOOKS,
-    first: 1,
   },
   {
     slug: 'corrin-duodecimo-6-colour',
@@ -389,6 +375,5 @@ export const DEVICES: ScenarioDevice[] = [
     lending: null,
     speech: null,
     formats: null,
-    first: 3,
   },
 ]

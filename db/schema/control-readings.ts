@@ -1,21 +1,8 @@
 import { sql } from 'drizzle-orm'
-import { check, doublePrecision, index, integer, pgTable, text, unique } from 'drizzle-orm/pg-core'
-import { controlKind, controlMoment } from './enums'
+import { check, doublePrecision, index, integer, pgTable, unique } from 'drizzle-orm/pg-core'
+import { controlSamples } from './control-samples'
+import { controlMoment } from './enums'
 import { sessions } from './sessions'
-
-/** What is read in every session: a tile for stability, a chart white, and a numbered paper for meaning. */
-export const controlSamples = pgTable(
-  'control_samples',
-  {
-    id: integer().primaryKey().generatedAlwaysAsIdentity(),
-    kind: controlKind().notNull(),
-    name: text().notNull(),
-    serial: text().notNull(),
-    /** Backing, storage, brighteners: what one must know to read it again. */
-    note: text().notNull(),
-  },
-  (t) => [unique('control_samples_serial_key').on(t.serial)],
-)
 
 /** Readings of a control at the start and the end of a session. Never changed, never removed (trigger). */
 export const controlReadings = pgTable(
