@@ -17,6 +17,8 @@ const config: NextConfig = {
   pageExtensions: withSpecimen ? ['tsx', 'ts', 'specimen.tsx'] : ['tsx', 'ts'],
   poweredByHeader: false,
   reactStrictMode: true,
+  // Titles come with the page, for every reader: streamed after it, they arrive late and at the wrong place.
+  htmlLimitedBots: /.*/,
   // The image optimizer has had remote code execution advisories, and nothing here needs it.
   images: { unoptimized: true },
   serverExternalPackages: ['postgres', 'piscina'],

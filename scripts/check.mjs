@@ -29,7 +29,7 @@ export const CHECKS = [
   { name: 'The types hold', work: () => run(bin('tsc'), ['--noEmit', '-p', '.']) },
   {
     name: 'Format, lint and forbidden imports are clean',
-    work: () => run(bin('biome'), ['ci', '--error-on-warnings', '.']),
+    work: () => run(bin('biome'), ['ci', '--colors=off', '--error-on-warnings', '.']),
   },
   { name: 'The core is pure', work: checkPurity },
   { name: 'No code is dead', work: () => run(bin('knip'), ['--no-progress']) },

@@ -1,0 +1,77 @@
+'use client'
+
+import { LazyMotion, MotionConfig } from 'framer-motion'
+import { useEffect, useMemo, useState } from 'react'
+import { Notice } from '@/components/ui/notice'
+import { formatLux, formatNumber } from '@/lib/format/number'
+import { nearestLevel } from '@/lib/lamp/levels'
+import { FRONT_LIGHT_BELOW_LUX } from '@/lib/lamp/question'
+import { gloomOfPaper, type LampDevice, rankUnderLamp } from '@/lib/lamp/ranking'
+import type { Lab } from '@/lib/method/types'
+import { BoothRow } from './booth-row'
+import { Lamp } from './lamp'
+import { LightControl } from './light-control'
+import { useStillness } from './use-stillness'
+
+const motionFeatures = () => import('framer-motion').then(({ domMax }) => domMax)
+
+/** How many pages stand in the booth. */
+const STANDING = 5
+const ADDRESS_DELAY_MS = 400
+
+/**
+ * The lamp, the pages under it in the order of their fit, and the control of its light. Ranked by the method's own code,
+ * on the server for the first picture and in the browser from then on; the light is kept in the address.
+ */
+export function LampStage({
+  devices,
+  paper,
+  openingLux,
+}: {
+  devices: readonly LampDevice[]
+  paper: Lab
+  openingLux: number
+}) {
+  const [lux, setLux] = useState(openingLux)
+  const still = useStillness()
+  const rows = useMemo(() => rankUnderLamp(devices, lux), [devices, lux])
+  const readable = rows.some((row) => row.readable)
+
+  useEffect(() => {
+    if (lux === openingLux) return
+    const later = setTimeout(() => window.history.replaceState(null, '', `?lux=${lux}`), ADDRESS_DELAY_MS)
+    return () => clearTimeout(later)
+  }, [lux, openingLux])
+
+  return (
+    <LazyMotion features={motionFeatures} strict>
+      <MotionConfig reducedMotion="user" transition={{ duration: still ? 0 : 0.2 }}>
+        <div className="relative grid min-w-0 content-end gap-5 sm:pt-60">
+          <Lamp lux={lux} />
+          <BoothRow rows={rows.slice(0, STANDING)} paper={paper} paperGloom={gloomOfPaper(paper, lux)} still={still} />
+          <div className="relative grid gap-3">
+            <LightControl lux={lux} onChange={setLux}>
+              <p role="status" className="text-brass-lit">
+                {nearestLevel(lux).name}, about {formatLux(lux)} lux:{' '}
+                {readable
+                  ? `the ${formatNumber(Math.min(STANDING, rows.length))} closest fits of ${formatNumber(rows.length)} devices.`
+                  : 'none of these pages can be read.'}
+              </p>
+            </LightControl>
+            <p className="text-note text-soft">
+              Fit, 0 to 100, for a reader of mostly novels who holds the device in two hands and minds all four things
+              alike; a front light is used under {formatNumber(FRONT_LIGHT_BELOW_LUX)} lux. A few points apart may be
+              too close to call: the quiz shows the doubts. The strip beside each page is our control paper. Colours and
+              the dark are approximate on your display.
+            </p>
+            {!readable && (
+              <Notice look="warning">
+                With this little light and no front light, nobody could read any of these pages. Turn the lamp up.
+              </Notice>
+            )}
+          </div>
+        </div>
+      </MotionConfig>
+    </LazyMotion>
+  )
+}

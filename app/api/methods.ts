@@ -1,0 +1,15 @@
+import { problem } from '@/lib/contract/problem'
+
+type Method = 'GET' | 'HEAD' | 'POST' | 'PUT' | 'PATCH' | 'DELETE'
+
+/**
+ * Handlers for the methods an address has no other handler for: OPTIONS names those it answers, and the rest get 405,
+ * which names them too (RFC 9110, sections 9.3.7 and 15.5.6).
+ */
+export function only(...methods: Method[]) {
+  const allow = [...methods, 'OPTIONS'].join(', ')
+  return {
+    options: async () => new Response(null, { status: 204, headers: { allow } }),
+    refused: async () => problem(405, `This address answers ${allow}`, [], { allow }),
+  }
+}
