@@ -53,8 +53,8 @@ export const CONTROLS: {
     kind: 'paper',
     name: 'Control paper no. 4',
     serial: 'MQ-PAPER-4',
-    note: 'Office paper with brightener, 80 g/m², read on four sheets of itself, kept in the dark; UV included.',
-    lab: { L: 94.6, a: 2.1, b: -8.4 },
+    note: 'Uncoated paper chosen for having almost no brightener, 80 g/m², read on four sheets of itself, kept in the dark; UV included.',
+    lab: { L: 93.9, a: 0.3, b: -1.3 },
   },
 ]
 
