@@ -1,5 +1,5 @@
 import { Notice } from '@/components/ui/notice'
-import { LAST_STEP, luxAt, OPENING_LUX, parseLux } from '@/lib/lamp/levels'
+import { lightFrom } from '@/lib/lamp/levels'
 import type { LampDevice } from '@/lib/lamp/ranking'
 import type { EditionDevice } from '@/lib/method/types'
 import { latestEdition } from '@/lib/server/editions'
@@ -16,7 +16,7 @@ export default async function HomePage({ searchParams }: { searchParams: Search 
     <main>
       <Hero edition={edition}>
         {edition && edition.devices.length > 0 ? (
-          <LampStage devices={edition.devices.map(slim)} paper={edition.control.paper} openingLux={lightOf(search)} />
+          <LampStage devices={edition.devices.map(slim)} paper={edition.control.paper} openingLux={lightFrom(search)} />
         ) : (
           <Notice className="self-center">
             No edition has been released yet, so there are no pages to show. The bench is at work; the method is already
@@ -28,13 +28,6 @@ export default async function HomePage({ searchParams }: { searchParams: Search 
       {edition && <SamePage edition={edition} />}
     </main>
   )
-}
-
-/** The light an address asks for, by lux or by the slider's step; a bedside lamp where it asks for none we understand. */
-function lightOf({ lux, step }: Awaited<Search>): number {
-  const asked = typeof lux === 'string' ? parseLux(lux) : null
-  if (asked !== null) return asked
-  return typeof step === 'string' && /^\d{1,3}$/.test(step) ? luxAt(Math.min(Number(step), LAST_STEP)) : OPENING_LUX
 }
 
 /** Only what the lamp needs travels to the browser. */

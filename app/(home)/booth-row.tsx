@@ -33,7 +33,7 @@ export function BoothRow({
       />
       <ol className="relative grid sm:grid-cols-5" aria-label="The pages that fit best in this light, best first">
         <AnimatePresence initial={false} mode="popLayout">
-          {rows.map(({ device, fit, readable, lit, unstated, gloom }) => (
+          {rows.map(({ device, fit, readable, frontLight, gloom }) => (
             <m.li
               key={device.slug}
               layout={still ? false : 'position'}
@@ -51,9 +51,7 @@ export function BoothRow({
                   {readable ? formatNumber(fit) : <span className="text-small">not readable</span>}
                   {readable && <span className="sr-only"> of 100</span>}
                 </span>
-                <span className="block min-h-5 text-note text-soft">
-                  {lit ? 'front light on' : unstated ? 'front light not stated' : ''}
-                </span>
+                <span className="block min-h-5 text-note text-soft">{FRONT_LIGHT[frontLight]}</span>
               </p>
             </m.li>
           ))}
@@ -61,6 +59,13 @@ export function BoothRow({
       </ol>
     </div>
   )
+}
+
+const FRONT_LIGHT: Record<LampRow['frontLight'], string> = {
+  on: 'front light on',
+  none: 'no front light',
+  unstated: 'front light not stated',
+  off: '',
 }
 
 /** Enough to fill the smallest sheet and fit on it. */

@@ -1,7 +1,7 @@
 'use client'
 
 import { LazyMotion, MotionConfig } from 'framer-motion'
-import { useEffect, useMemo, useState } from 'react'
+import { useMemo } from 'react'
 import { Notice } from '@/components/ui/notice'
 import { formatLux, formatNumber } from '@/lib/format/number'
 import { nearestLevel } from '@/lib/lamp/levels'
@@ -11,13 +11,13 @@ import type { Lab } from '@/lib/method/types'
 import { BoothRow } from './booth-row'
 import { Lamp } from './lamp'
 import { LightControl } from './light-control'
+import { useLight } from './use-light'
 import { useStillness } from './use-stillness'
 
 const motionFeatures = () => import('framer-motion').then(({ domMax }) => domMax)
 
 /** How many pages stand in the booth. */
 const STANDING = 5
-const ADDRESS_DELAY_MS = 400
 
 /**
  * The lamp, the pages under it in the order of their fit, and the control of its light. Ranked by the method's own code,
@@ -32,16 +32,10 @@ export function LampStage({
   paper: Lab
   openingLux: number
 }) {
-  const [lux, setLux] = useState(openingLux)
+  const [lux, setLux] = useLight(openingLux)
   const still = useStillness()
   const rows = useMemo(() => rankUnderLamp(devices, lux), [devices, lux])
   const readable = rows.some((row) => row.readable)
-
-  useEffect(() => {
-    if (lux === openingLux) return
-    const later = setTimeout(() => window.history.replaceState(null, '', `?lux=${lux}`), ADDRESS_DELAY_MS)
-    return () => clearTimeout(later)
-  }, [lux, openingLux])
 
   return (
     <LazyMotion features={motionFeatures} strict>

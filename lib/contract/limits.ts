@@ -47,4 +47,3 @@ export const limitsSchema = strictObject(
       minDiagonal === undefined || maxDiagonal === undefined || minDiagonal <= maxDiagonal,
     { path: ['minDiagonal'], error: 'is above maxDiagonal; no page is both larger and smaller' },
   )
-export type LimitsRequest = z.output<typeof limitsSchema>

@@ -7,7 +7,11 @@ export type Quantity = (states: { page: Lab; ink: Lab }) => number
 export type Measured = Pick<EditionDevice, 'slug' | 'page' | 'ink' | 'sessions'>
 export type Doubts = Pick<Edition, 'uncertainty'>
 
-const CHANNELS = ['L', 'a', 'b'] as const
+/** Errors are drawn up in threes, L*, a*, b*: page and ink of the one, of the other, the common ones, each session's. */
+const PAGE_OF_ONE = 0
+const PAGE_OF_OTHER = 6
+const COMMON = 12
+const SESSIONS = 15
 
 /**
  * Expanded uncertainty (k = 2) of the difference of one figure between two devices of an edition. The errors they share
@@ -18,30 +22,30 @@ const CHANNELS = ['L', 'a', 'b'] as const
 export function differenceDoubt({ uncertainty }: Doubts, one: Measured, other: Measured, quantity: Quantity): number {
   const sessions = [...new Set([...Object.keys(one.sessions), ...Object.keys(other.sessions)])]
   const sizes = [
-    ...[one.page.u, one.ink.u, other.page.u, other.ink.u, uncertainty.common].flatMap(channels),
-    ...sessions.flatMap(() => channels(uncertainty.session)),
-  ]
+    ...[one.page.u, one.ink.u, other.page.u, other.ink.u, uncertainty.common],
+    ...sessions.map(() => uncertainty.session),
+  ].flatMap(({ L, a, b }) => [L, a, b])
 
-  function figure(device: Measured, errors: number[], own: number): number {
-    const shared = CHANNELS.map((_, channel) =>
-      sessions.reduce(
-        (sum, id, place) => sum + (device.sessions[id] ?? 0) * errors[15 + 3 * place + channel]!,
-        errors[12 + channel]!,
-      ),
+  function figure(device: Measured, errors: readonly number[], ownFrom: number): number {
+    const shared = sessions.reduce(
+      (sum, id, i) => plus(sum, three(errors, SESSIONS + 3 * i), device.sessions[id] ?? 0),
+      three(errors, COMMON),
     )
-    const shifted = (state: Lab, from: number) => ({
-      L: state.L + errors[from]! + shared[0]!,
-      a: state.a + errors[from + 1]! + shared[1]!,
-      b: state.b + errors[from + 2]! + shared[2]!,
-    })
-    return quantity({ page: shifted(device.page, own), ink: shifted(device.ink, own + 3) })
+    const shifted = (state: Lab, from: number) => plus(plus(state, three(errors, from)), shared)
+    return quantity({ page: shifted(device.page, ownFrom), ink: shifted(device.ink, ownFrom + 3) })
   }
 
-  const difference = (errors: number[]) => figure(one, errors, 0) - figure(other, errors, 6)
+  const difference = (errors: number[]) => figure(one, errors, PAGE_OF_ONE) - figure(other, errors, PAGE_OF_OTHER)
   return COVERAGE_FACTOR * propagate(difference, Array(sizes.length).fill(0), sizes)
 }
 
-const channels = (lab: Lab) => CHANNELS.map((channel) => lab[channel])
+function three(errors: readonly number[], from: number): Lab {
+  return { L: errors[from]!, a: errors[from + 1]!, b: errors[from + 2]! }
+}
+
+function plus(one: Lab, other: Lab, share = 1): Lab {
+  return { L: one.L + share * other.L, a: one.a + share * other.a, b: one.b + share * other.b }
+}
 
 /** Whether two devices' figures differ by no more than the doubt of their difference. */
 export function withinDoubt(doubts: Doubts, one: Measured, other: Measured, quantity: Quantity): boolean {

@@ -47,6 +47,13 @@ export function parseLux(text: string | undefined): number | null {
   return held(Number(plain))
 }
 
+/** The light an address asks for, by lux or by the slider's step; a bedside lamp where it asks for none we understand. */
+export function lightFrom({ lux, step }: { lux?: unknown; step?: unknown }): number {
+  const asked = typeof lux === 'string' ? parseLux(lux) : null
+  if (asked !== null) return asked
+  return typeof step === 'string' && /^\d{1,3}$/.test(step) ? luxAt(Math.min(Number(step), LAST_STEP)) : OPENING_LUX
+}
+
 function held(lux: number): number {
   return Math.min(BRIGHTEST_LUX, Math.max(DARKEST_LUX, lux))
 }

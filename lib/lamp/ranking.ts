@@ -2,7 +2,7 @@ import { lightnessToY } from '@/lib/colour/lab'
 import { prepareAnswers, scoreDevice, surfaceOf } from '@/lib/method/fit'
 import { clamp, pageLuminance } from '@/lib/method/light'
 import { byFit } from '@/lib/method/order'
-import { luminanceIn } from '@/lib/method/reserve'
+import { type Light, luminanceIn, type Surface } from '@/lib/method/reserve'
 import type { EditionDevice, Lab } from '@/lib/method/types'
 import { lampAnswers } from './question'
 
@@ -17,10 +17,8 @@ export type LampRow = {
   /** 0–100; 0 where nothing can be read. */
   fit: number
   readable: boolean
-  /** True where the page's own front light is turned on in this light. */
-  lit: boolean
-  /** True where one could be used but it is not stated whether there is one; it counts as none. */
-  unstated: boolean
+  /** What the front light does in this light; `unstated` counts as none, `off`: nobody would turn one on. */
+  frontLight: 'on' | 'none' | 'unstated' | 'off'
   /** How dark the page looks, 0 (as measured) to 1 (black): a picture, not a measurement. */
   gloom: number
 }
@@ -37,6 +35,13 @@ function gloomAt(luminance: number): number {
 /** How dark a paper looks in this light; it has no light of its own. */
 export function gloomOfPaper(paper: Lab, lux: number): number {
   return gloomAt(pageLuminance(lux, lightnessToY(paper.L), 0))
+}
+
+function frontLightIn(light: Light, { frontLight }: LampDevice, surface: Surface): LampRow['frontLight'] {
+  if (!light.frontLight) return 'off'
+  if (frontLight === null) return 'unstated'
+  if (surface.frontLight === 0) return 'none'
+  return luminanceIn(surface, light) > luminanceIn(surface, { ...light, frontLight: false }) ? 'on' : 'off'
 }
 
 /**
@@ -56,8 +61,7 @@ export function rankUnderLamp(devices: readonly LampDevice[], lux: number): Lamp
         device,
         fit,
         readable: unreadable < 1,
-        lit: luminance > luminanceIn(surface, { ...light, frontLight: false }),
-        unstated: light.frontLight && device.frontLight === null,
+        frontLight: frontLightIn(light, device, surface),
         gloom: gloomAt(luminance),
       }
     })

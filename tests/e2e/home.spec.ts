@@ -58,6 +58,9 @@ test('the light stays in the address, so that it can be shared', async ({ page }
   await expect(page).toHaveURL(/\?lux=400$/)
   await page.reload()
   await expect(page.getByRole('status')).toContainText('Desk, about 400 lux')
+  await page.getByRole('link', { name: 'Lampleaf' }).click()
+  await expect(page).toHaveURL(/\/$/)
+  await expect(page.getByRole('status')).toContainText('Bedside lamp, about 80 lux')
 })
 
 test('a number of lux can be typed, and what is no number is told so', async ({ page, request }) => {

@@ -22,8 +22,9 @@ describe('in the dark', () => {
   const [first, ...others] = rankUnderLamp(devices, 0.1)
 
   test('only a page with a light of its own can be read, and it is drawn lit', () => {
-    expect(first).toMatchObject({ device: { slug: 'lit' }, readable: true, lit: true, gloom: 0 })
-    for (const row of others) expect(row).toMatchObject({ readable: false, lit: false, fit: 0 })
+    expect(first).toMatchObject({ device: { slug: 'lit' }, readable: true, frontLight: 'on', gloom: 0 })
+    for (const row of others) expect(row).toMatchObject({ readable: false, fit: 0 })
+    expect(others.map((row) => row.frontLight)).toEqual(['none', 'unstated'])
   })
 
   // At 0.1 lux a page of L* 75 (Y 48.3) gives back 0.1·48.3/314 = 0.0154 cd/m²: under the picture's black of 0.02.
@@ -33,8 +34,8 @@ describe('in the dark', () => {
 })
 
 test('from 100 lux up no front light is turned on', () => {
-  expect(rankUnderLamp(devices, 99).some(({ lit }) => lit)).toBe(true)
-  expect(rankUnderLamp(devices, 100).some(({ lit }) => lit)).toBe(false)
+  expect(rankUnderLamp(devices, 99).some(({ frontLight }) => frontLight === 'on')).toBe(true)
+  expect(rankUnderLamp(devices, 100).some(({ frontLight }) => frontLight === 'on')).toBe(false)
 })
 
 test('without any front light the dark leaves nothing readable', () => {
