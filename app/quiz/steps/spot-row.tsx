@@ -19,14 +19,16 @@ export function SpotRow({ spot, text, error }: { spot: (typeof SPOTS)[number] } 
     <fieldset className="border-b border-rule py-2.5">
       <legend className="sr-only">{name}</legend>
       {wrong && <FieldError id={slug}>{wrong}</FieldError>}
-      <div className="grid grid-cols-[auto_minmax(0,1fr)_auto] items-start gap-x-3 paper:grid-cols-[minmax(0,1fr)_auto] sm:gap-x-4.5">
+      <div className="grid grid-cols-[auto_minmax(0,1fr)_auto] items-start gap-x-3 sm:gap-x-4.5">
         <LightPatch lux={shownLux ?? spot.lux} />
-        <p aria-hidden="true" className="col-start-2 pt-0.5 leading-snug font-semibold sm:text-lead">
+        <p aria-hidden="true" className="col-start-2 row-start-1 pt-0.5 leading-snug font-semibold sm:text-lead">
           {name}
         </p>
-        <HoursControl name={slug} where={name} defaultValue={text(slug)} error={wrong} />
+        <div className="col-start-3 row-start-1">
+          <HoursControl name={slug} where={name} defaultValue={text(slug)} error={wrong} />
+        </div>
         <Disclosure
-          className="col-span-2 col-start-2 text-note paper:col-start-1 sm:-mt-4 sm:[&>summary]:min-h-8"
+          className="col-span-2 col-start-2 row-start-2 text-note sm:-mt-4 sm:[&>summary]:min-h-8"
           open={Boolean(error(`${slug}.lux`) || error(`${slug}.light`))}
           summary={
             <span>
