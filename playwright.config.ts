@@ -21,8 +21,8 @@ export default defineConfig({
   workers: 2,
   forbidOnly: true,
   retries: 0,
-  timeout: 60_000,
-  expect: { timeout: 10_000 },
+  timeout: 120_000,
+  expect: { timeout: 20_000 },
   use: {
     baseURL: process.env.BASE_URL ?? 'http://127.0.0.1:3000',
     locale: 'en-GB',

@@ -1,4 +1,3 @@
-
 import { listOf, numberFrom, strictObject, textLike, truth, wholeFrom } from './values'
 
 // The upper bounds are house: far above any reading device, and low enough to stay exact in a double.
