@@ -1,6 +1,11 @@
 import { spawn } from 'node:child_process'
 import { Trouble } from './steps.mjs'
 
+/** Programs of ours that still run. */
+const children = new Set()
+const endings = []
+let ending = null
+
 /**
  * Runs a program to its end; its output is kept back and shown only where it fails.
  * @returns its standard output
@@ -12,6 +17,7 @@ export function run(command, args, { env = {}, cwd, input, show = false } = {}) 
       env: { ...process.env, ...env },
       stdio: [input === undefined ? 'ignore' : 'pipe', show ? 'inherit' : 'pipe', show ? 'inherit' : 'pipe'],
     })
+    children.add(child)
     let out = ''
     let all = ''
     child.stdout?.on('data', (chunk) => {
@@ -22,8 +28,12 @@ export function run(command, args, { env = {}, cwd, input, show = false } = {}) 
       all += chunk
     })
     if (input !== undefined) child.stdin.end(input)
-    child.on('error', (cause) => reject(new Trouble(`${command} could not be run: ${cause.message}`)))
+    child.on('error', (cause) => {
+      children.delete(child)
+      reject(new Trouble(`${command} could not be run: ${cause.message}`))
+    })
     child.on('close', (code) => {
+      children.delete(child)
       if (code === 0) return resolve(out)
       const failure = new Trouble(`${command} ${args.join(' ')} ended with ${code}.\n${all.trim()}`)
       failure.code = code
@@ -32,10 +42,6 @@ export function run(command, args, { env = {}, cwd, input, show = false } = {}) 
     })
   })
 }
-
-const children = new Set()
-const endings = []
-let ending = null
 
 /** Starts a program that stays until we stop. `onExit` hears of an end that nobody asked for. */
 export function keepRunning(command, args, { env = {}, log, onExit } = {}) {
@@ -66,6 +72,7 @@ export function stopEverything() {
 
 function stop(child) {
   return new Promise((resolve) => {
+    if (child.exitCode !== null || child.signalCode !== null) return resolve()
     const harder = setTimeout(() => child.kill('SIGKILL'), 8000)
     child.once('exit', () => {
       clearTimeout(harder)
