@@ -17,7 +17,7 @@ export function LightPatch({ lux }: { lux: number }) {
   return (
     <span
       aria-hidden="true"
-      className="mt-0.5 block h-11 w-8 rounded-sheet border border-edge sm:w-13.5 paper:hidden"
+      className="mt-0.5 mr-3 block h-11 w-8 rounded-sheet border border-edge sm:mr-4.5 sm:w-13.5 paper:hidden"
       style={{ background }}
     />
   )

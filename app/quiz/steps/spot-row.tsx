@@ -19,12 +19,12 @@ export function SpotRow({ spot, text, error }: { spot: (typeof SPOTS)[number] } 
     <fieldset className="border-b border-rule py-2.5">
       <legend className="sr-only">{name}</legend>
       {wrong && <FieldError id={slug}>{wrong}</FieldError>}
-      <div className="grid grid-cols-[auto_minmax(0,1fr)_auto] items-start gap-x-3 sm:gap-x-4.5">
+      <div className="grid grid-cols-[auto_minmax(0,1fr)_auto] items-start">
         <LightPatch lux={shownLux ?? spot.lux} />
         <p aria-hidden="true" className="col-start-2 row-start-1 pt-0.5 leading-snug font-semibold sm:text-lead">
           {name}
         </p>
-        <div className="col-start-3 row-start-1">
+        <div className="col-start-3 row-start-1 pl-3 sm:pl-4.5">
           <HoursControl name={slug} where={name} defaultValue={text(slug)} error={wrong} />
         </div>
         <Disclosure
