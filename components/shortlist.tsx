@@ -98,7 +98,7 @@ function LeftOut({ excluded }: { excluded: readonly { slug: string; name: string
   return (
     <details className="mt-5 border-t border-rule pt-2 text-note">
       <summary className="flex min-h-11 cursor-pointer items-center">
-        {formatNumber(excluded.length)} {excluded.length === 1 ? 'device' : 'devices'} left out by your limits
+        {formatNumber(excluded.length)} {excluded.length === 1 ? 'device' : 'devices'} left out, and why
       </summary>
       <ul className="grid gap-1 text-soft">
         {excluded.map((device) => (

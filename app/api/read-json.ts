@@ -25,14 +25,24 @@ export async function readJson(request: Request): Promise<{ value: unknown } | {
     return { refusal: problem(400, 'The question is not understood', [{ field: twice, message }]) }
   } catch (error) {
     // Broken UTF-8 and broken JSON are the sender's; anything else is ours.
-    if (error instanceof SyntaxError || error instanceof TypeError) return refuse(400, 'The body is not JSON in UTF-8')
+    if (error instanceof SyntaxError || error instanceof TypeError)
+      return refuse(
+        400,
+        `The body is not JSON in UTF-8${error instanceof SyntaxError ? `: ${plain(error.message)}` : ''}`,
+      )
     throw error
   }
 }
 
 const refuse = (status: number, title: string, headers: HeadersInit = {}) => ({
-  refusal: problem(status, title, [], headers),
+  refusal: problem(status, title, [{ field: '', message: `${title}.` }], headers),
 })
+
+/** The parser's words about where it stopped, without the reader's own text in them. */
+function plain(message: string): string {
+  const place = /position \d+/.exec(message)
+  return place ? `it breaks off at ${place[0]}` : 'it ends too early or is not JSON at all'
+}
 
 async function readBody(request: Request): Promise<Uint8Array | 'too large' | 'too slow'> {
   if (Number(request.headers.get('content-length')) > MAX_BODY_BYTES) return 'too large'

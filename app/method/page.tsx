@@ -33,7 +33,7 @@ export default function MethodPage() {
       <h1>Method 1</h1>
       <p className="mt-4 max-w-[60ch] text-lead text-soft">
         We read how much light each page gives back, work out how well it reads where you read, and say how sure we are.
-        This is all of it: every formula and constant, with where it is from.
+        Every formula and constant that makes a figure or moves a rank is here, with where it is from.
       </p>
       <p className="mt-4 max-w-[68ch]">
         The tables are made from the same constants the ranking computes with. <em>Published</em> means we could name

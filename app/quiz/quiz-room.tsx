@@ -13,6 +13,7 @@ import { StepForm } from './step-form'
 import { useDraws } from './use-draws'
 import { useEdition } from './use-edition'
 import { useOwnAddress } from './use-own-address'
+import { useSilentReferrer } from './use-silent-referrer'
 
 // A content policy without eval would report zod's probe for it.
 z.config({ jitless: true })
@@ -24,6 +25,7 @@ z.config({ jitless: true })
  * @param formats file formats that devices of the edition open
  */
 export function QuizRoom({ initial, formats }: { initial: ShortlistView; formats: readonly string[] }) {
+  useSilentReferrer()
   const search = useSearchParams()
   const step = stepIn(search.get('step'))
   const estimate = targetIn(search.get('estimate'))

@@ -1,4 +1,5 @@
 import type { Theme } from '@/lib/theme'
+import { WayBack } from './way-back'
 
 const CHOICES: readonly { value: Theme | 'automatic'; name: string }[] = [
   { value: 'day', name: 'Day' },
@@ -14,6 +15,7 @@ export function ThemeChoice({ theme }: { theme: Theme | null }) {
       <h2 id="theme-choice" className="font-text text-body font-semibold">
         How it looks
       </h2>
+      <WayBack />
       <div className="mt-2 flex flex-wrap gap-2">
         {CHOICES.map(({ value, name }) => (
           <button

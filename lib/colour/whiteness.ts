@@ -19,6 +19,14 @@ export const WHITENESS_D65_10: Readonly<WhitenessFormula> = {
   source: 'CIE 15, whiteness and tint; ISO 11475',
 }
 
+/** Factors of the formulas that both observers share. */
+export const WHITENESS_FACTORS = {
+  x: 800,
+  y: 1700,
+  tintY: 650,
+  source: 'CIE 15, whiteness and tint; ISO 11475',
+} as const
+
 /** The limits within which CIE vouches for the figures; both ends are outside. Source: CIE 15. */
 export const WHITENESS_LIMITS = { lowest: 40, perY: 5, belowY: 280, tintLowest: -4, tintHighest: 2 } as const
 
@@ -37,8 +45,8 @@ export function cieWhiteness(
 ): { whiteness: number; tint: number; withinLimits: boolean } {
   requireFinite('x, y, Y', x, y, Y)
   if (!(Y >= 0 && Y <= 100)) throw new RangeError(`Y must be a percentage from 0 to 100, got ${Y}`)
-  const whiteness = Y + 800 * (xn - x) + 1700 * (yn - y)
-  const tint = tintX * (xn - x) - 650 * (yn - y)
+  const whiteness = Y + WHITENESS_FACTORS.x * (xn - x) + WHITENESS_FACTORS.y * (yn - y)
+  const tint = tintX * (xn - x) - WHITENESS_FACTORS.tintY * (yn - y)
   // Only Y > 64 can pass, so every e-paper page is outside; we publish the figures with that label.
   const { lowest, perY, belowY, tintLowest, tintHighest } = WHITENESS_LIMITS
   const withinLimits = whiteness > lowest && whiteness < perY * Y - belowY && tint > tintLowest && tint < tintHighest

@@ -32,13 +32,14 @@ const MOST_ERRORS = 50
 
 /** What a schema refused, as fields and whole sentences. At most 50: a thousand wrong spots need no thousand lines. */
 export function fieldErrors(error: z.core.$ZodError): FieldError[] {
-  return error.issues
-    .flatMap((issue) =>
-      issue.code === 'unrecognized_keys'
-        ? issue.keys.slice(0, MOST_ERRORS).map((key) => sentence([...issue.path, key], issue.message))
-        : [sentence(issue.path, issue.message)],
-    )
-    .slice(0, MOST_ERRORS)
+  const all = error.issues.flatMap((issue) =>
+    issue.code === 'unrecognized_keys'
+      ? issue.keys.slice(0, MOST_ERRORS).map((key) => sentence([...issue.path, key], issue.message))
+      : [sentence(issue.path, issue.message)],
+  )
+  // Two rules of one field, such as whole and not too large, may be broken at once; it is told once.
+  const once = new Map(all.map((one) => [`${one.field}\n${one.message}`, one]))
+  return [...once.values()].slice(0, MOST_ERRORS)
 }
 
 function sentence(path: PropertyKey[], message: string): FieldError {

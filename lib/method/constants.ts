@@ -158,6 +158,12 @@ const WEIGHTS = {
     source: CAM,
     standing: 'from memory',
   } as Constant<number>,
+  adaptation: {
+    name: 'Terms of F_L',
+    value: { 'low light': 0.2, light: 5, 'high light': 0.1, root: 3 },
+    source: CAM,
+    standing: 'from memory',
+  } as Constant<{ 'low light': number; light: number; 'high light': number; root: number }>,
   colourfulnessPower: {
     name: 'Power of F_L in colourfulness',
     value: 0.25,

@@ -1,5 +1,5 @@
 import { D65_10 } from '@/lib/colour/white'
-import { WHITENESS_D65_10 } from '@/lib/colour/whiteness'
+import { WHITENESS_D65_10, WHITENESS_FACTORS } from '@/lib/colour/whiteness'
 import { METHOD } from './constants'
 import { clarityScore, LEAST_TOTAL, WHITENESS_DIM, WHITENESS_SPAN } from './criteria'
 import { type Errors, errorSource, lightnessSpread } from './errors'
@@ -101,13 +101,14 @@ function drawDevice(
 }
 
 const { xn, yn } = WHITENESS_D65_10
+const { x: toX, y: toY } = WHITENESS_FACTORS
 
 /** W₁₀ straight from L*, a*, b*, without an object a draw; the same sums as lib/colour's, held to them by the tests. */
 function whitenessOf(L: number, Y: number, a: number, b: number): number {
   const fy = (L + 16) / 116
   const X = D65_10.X * expand(fy + a / 500)
   const total = X + Y + D65_10.Z * expand(fy - b / 200)
-  return total > LEAST_TOTAL ? Y + 800 * (xn - X / total) + 1700 * (yn - Y / total) : Y
+  return total > LEAST_TOTAL ? Y + toX * (xn - X / total) + toY * (yn - Y / total) : Y
 }
 
 /** lib/colour's lightnessToY, its range already kept. */

@@ -13,7 +13,8 @@ export function questionText(answers: Answers): string {
   const hours = spots.reduce((sum, spot) => sum + spot.hours, 0)
   const used = spots.filter((spot) => spot.hours > 0)
   return JSON.stringify({
-    spots: used.map((spot) => [spot.lux, share(spot.hours, hours), spot.frontLight]),
+    // In an order of their own: naming the same places another way round is the same question.
+    spots: used.map((spot) => JSON.stringify([spot.lux, share(spot.hours, hours), spot.frontLight])).sort(),
     lightNeed,
     text,
     preferredWhite,

@@ -79,8 +79,9 @@ export function colourfulness(lux: number): number {
 
 function adaptation(lux: number): number {
   const adapting = (W.adaptingShare.value * lux) / Math.PI
-  const k4 = (1 / (5 * adapting + 1)) ** 4
-  return 0.2 * k4 * 5 * adapting + 0.1 * (1 - k4) ** 2 * Math.cbrt(5 * adapting)
+  const { light, 'low light': low, 'high light': high, root } = W.adaptation.value
+  const k4 = (1 / (light * adapting + 1)) ** 4
+  return low * k4 * light * adapting + high * (1 - k4) ** 2 * (light * adapting) ** (1 / root)
 }
 
 /** @param reserves contrast reserves of the two reference pages in this spot's light, for this reader's eye */

@@ -3,8 +3,8 @@ import { formatShare } from '@/lib/format/number'
 import { groupTies } from '@/lib/method/groups'
 import type { RankedDevice } from '@/lib/method/types'
 
-/** House: a lead below so many points of fit, or in so small a share of draws, is a whisker. */
-const WHISKER = { points: 1, first: 0.5 }
+/** House: first in fewer than half of the draws is a whisker; in up to three quarters with a lead below a point, too. */
+const WHISKER = { first: 0.5, points: 1, firstByPoints: 0.75 }
 const MOST_NAMED = 5
 
 /** How far the first is ahead: alone left, level, within the doubt by a whisker or a little, or clear of the others. */
@@ -15,7 +15,8 @@ export function marginOf(ranked: readonly Pick<RankedDevice, 'slug' | 'fit' | 'f
   if (!first || !second) return 'alone'
   const [group] = groupTies(ranked)
   if (!group || group.length < 2) return 'clear'
-  return first.fit - second.fit < WHISKER.points || first.first < WHISKER.first ? 'whisker' : 'little'
+  const narrow = first.fit - second.fit < WHISKER.points && first.first < WHISKER.firstByPoints
+  return first.first < WHISKER.first || narrow ? 'whisker' : 'little'
 }
 
 /** Behind the name of the first, in a headline. */

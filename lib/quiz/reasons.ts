@@ -48,13 +48,17 @@ export function sentenceOf(clauses: readonly string[]): string {
   return all && `${all[0]?.toUpperCase()}${all.slice(1)}.`
 }
 
-/** In the spot with the most hours, then every spot in which it cannot be read. */
+/** In the spot with the most hours of those it can be read in, then every spot in which it cannot. */
 function clarityClauses(device: EditionDevice, { answers, spots }: Reader): Clause[] {
   const eye = eyeOf(answers.lightNeed, answers.text)
   const seen = spots.map((spot) => ({ spot, ...deviceInLight(device, spot, eye) }))
-  const main = seen.reduce((most, one) => (one.spot.hours > most.spot.hours ? one : most))
+  const lit = seen.filter(({ readable }) => readable)
+  const main = lit.reduce<(typeof lit)[number] | null>(
+    (most, one) => (most && most.spot.hours >= one.spot.hours ? most : one),
+    null,
+  )
   const clauses: Clause[] = []
-  if (main.readable) {
+  if (main) {
     const { fluent, best } = READING_ANCHORS
     const enough =
       main.reserve < fluent
@@ -62,10 +66,10 @@ function clarityClauses(device: EditionDevice, { answers, spots }: Reader): Clau
         : main.reserve >= best
           ? ', all that the easiest reading asks for'
           : ''
-    const lit = main.frontLightOn ? ', with its front light on,' : ''
+    const aided = main.frontLightOn ? ', with its front light on,' : ''
     clauses.push({
       aim: 'clarity',
-      text: `${spotPhrase(main.spot)}${lit} its page keeps ${formatNumber(main.reserve, 1)} times the contrast your eyes need${enough}`,
+      text: `${spotPhrase(main.spot)}${aided} its page keeps ${formatNumber(main.reserve, 1)} times the contrast your eyes need${enough}`,
       good: main.reserve >= fluent,
     })
   }

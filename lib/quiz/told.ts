@@ -55,10 +55,12 @@ function spotWords(quiz: QuizAnswers): string[] {
 function aimWords({ weights, places }: QuizAnswers): string[] {
   if (weights)
     return [`weights by hand: ${AIMS.map((aim) => `${AIM_PHRASES[aim]} ${formatExact(weights[aim])}`).join(', ')}`]
-  return PLACES.flatMap((place) => {
+  const ranked = PLACES.flatMap((place) => {
     const aims = AIMS.filter((aim) => places[aim] === place).map((aim) => AIM_PHRASES[aim])
     return aims.length > 0 ? [`${formatOrdinal(place)} ${formatList(aims)}`] : []
   })
+  const rest = AIMS.filter((aim) => !places[aim]).length
+  return ranked.length > 0 && rest > 0 ? [...ranked, rest > 1 ? 'the others level behind' : 'the other behind'] : ranked
 }
 
 function limitWords({ limits }: QuizAnswers): string[] {

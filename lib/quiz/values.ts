@@ -54,7 +54,7 @@ export function pence(most: number, right: string) {
 
 /** One of a few words, and what each stands for. */
 export function oneOf<const T>(meanings: readonly (readonly [word: string, value: T])[]) {
-  const right = meanings.map(([word]) => `“${word}”`).join(' or ')
+  const right = `one of the choices (${meanings.map(([word]) => word).join(', ')})`
   return fromText((text) => meanings.find(([word]) => word === text)?.[1], right)
 }
 

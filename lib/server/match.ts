@@ -13,7 +13,10 @@ export class TooBusy extends Error {
   readonly retryAfterSeconds = 5
 }
 
-const MAX_WAITING = 40
+/** Rankings that may wait; with one thread and a second for the slowest question, the last waits this many seconds. */
+const MAX_WAITING = 12
+/** Milliseconds after which a ranking is given up. */
+const RANK_DEADLINE_MS = 15_000
 
 const globals = globalThis as { lampleafMatchPool?: Piscina }
 function pool(): Piscina {
@@ -48,5 +51,11 @@ export function matchOnServer(edition: Edition, answers: Answers): Promise<Ranke
 async function rank(edition: Edition, answers: Answers): Promise<RankedAnswer> {
   const threads = pool()
   if (threads.queueSize >= MAX_WAITING) throw new TooBusy('Too many rankings are waiting')
-  return (await threads.run({ edition, answers })) as RankedAnswer
+  const signal = AbortSignal.timeout(RANK_DEADLINE_MS)
+  try {
+    return (await threads.run({ edition, answers }, { signal })) as RankedAnswer
+  } catch (error) {
+    if (signal.aborted) throw new TooBusy('The ranking took too long', { cause: error })
+    throw error
+  }
 }

@@ -1,6 +1,9 @@
 import { mean, sd } from './describe'
 import { tQuantile } from './student-t'
 
+/** Level of Grubbs' test, both sides together. */
+export const GRUBBS_ALPHA = 0.05
+
 /** With three readings G cannot exceed 1.1547, a rounding away from its critical value: the test would judge noise. */
 const FEWEST_READINGS = 4
 
@@ -25,7 +28,7 @@ export type GrubbsResult =
  * @returns no statistic, with the reason, below four readings and where all readings are the same
  * @see Grubbs & Beck, Technometrics 14(4), 1972; ISO 5725-2:1994, 7.3.4
  */
-export function grubbs(readings: readonly number[], alpha = 0.05): GrubbsResult {
+export function grubbs(readings: readonly number[], alpha = GRUBBS_ALPHA): GrubbsResult {
   if (readings.length < FEWEST_READINGS) return noStatistic('too-few')
   const spread = sd(readings)
   if (!spread) return noStatistic('no-spread')

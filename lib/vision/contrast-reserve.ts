@@ -6,8 +6,8 @@ export const THRESHOLD_MODEL = {
   pupil: { middle: 2.3859, swing: 1.2204, slope: 0.3 },
   /** The light lost in the lens: the share of it that is gone, a year over the base age. */
   lens: { baseAge: 20, lossPerYear: 0.017 },
-  /** How much more contrast older eyes need: a year over the base age. */
-  ageing: { risePerYear: 0.113 / 45 },
+  /** How much more contrast older eyes need: this share of the threshold more, over so many years past the base age. */
+  ageing: { rise: 0.113, overYears: 45 },
   /** log Ct = constant + size·p1 + light·p2 + size2·p1² + light2·p2² + sizeLight·p1·p2. */
   log: {
     constant: -1.36415,
@@ -79,7 +79,7 @@ export function log10ThresholdContrast(luminance: number, age: number, size: num
   const p1 = Math.log10(Math.tanh(SIZE_SCALE * size))
   const p2 = Math.log10(logRetinal)
   return (
-    Math.log10(1 + ageing.risePerYear * (age - lens.baseAge)) +
+    Math.log10(1 + (ageing.rise / ageing.overYears) * (age - lens.baseAge)) +
     log.constant +
     p1 * (log.size + log.size2 * p1 + log.sizeLight * p2) +
     p2 * (log.light + log.light2 * p2)

@@ -30,6 +30,23 @@ describe('choosing a theme', () => {
     )
   })
 
+  test('goes where the form says one was, on this site alone', async () => {
+    const back = async (path: string) =>
+      (await send({ origin: SITE }, `theme=night&back=${encodeURIComponent(path)}`)).headers.get('location')
+    expect(await back('/quiz?step=2&train=4')).toBe('/quiz?step=2&train=4')
+    for (const elsewhere of [
+      '//evil.example',
+      'https://evil.example/',
+      '/\\evil.example',
+      '\\\\evil.example',
+      'quiz',
+      '',
+    ]) {
+      expect(await back(elsewhere), elsewhere).toBe('/')
+    }
+    expect(await back('/a\r\nSet-Cookie: x=1')).not.toMatch(/[\r\n]/)
+  })
+
   test('“automatic” drops the cookie', async () => {
     const answer = await send({ origin: SITE }, 'theme=automatic')
     expect(answer.headers.get('set-cookie')).toContain('theme=; Path=/; Max-Age=0')

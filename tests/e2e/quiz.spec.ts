@@ -148,7 +148,11 @@ test('while one answers, nothing is sent and nothing is stored', async ({ page, 
   await page.goto('/quiz')
   await expect(page.getByText('is the doubt, at about 95')).toBeVisible()
   const sent: string[] = []
-  page.on('request', (request) => sent.push(`${request.method()} ${request.url()}`))
+  const named: Promise<string | undefined>[] = []
+  page.on('request', (request) => {
+    sent.push(`${request.method()} ${request.url()}`)
+    named.push(request.allHeaders().then(({ referer }) => referer))
+  })
   await choose(page, 'Novels and other long prose', 'A lot')
   await next(page).click()
   await hours(page, TRAIN).fill('4')
@@ -159,6 +163,8 @@ test('while one answers, nothing is sent and nothing is stored', async ({ page, 
 
   const scripts = /\/_next\/|\/__nextjs|\/icon\.svg/
   expect(sent.filter((request) => !scripts.test(request) && !request.includes('blob:'))).toEqual([])
+  // Not even the address of the page, which holds the answers, goes along with a request for an icon.
+  for (const referer of await Promise.all(named)) expect(referer ?? '').not.toContain('?')
   expect(await context.cookies()).toEqual([])
   expect(await page.evaluate(() => localStorage.length + sessionStorage.length)).toBe(0)
 })

@@ -1,11 +1,15 @@
 import Link from 'next/link'
 import { Ladder } from '@/components/charts/ladder'
 import { READING_BANDS } from '@/components/reading-bands'
+import { lightnessToY } from '@/lib/colour/lab'
 import { ladderPoints } from '@/lib/findings/ladder'
 import type { PublishedFigures } from '@/lib/findings/published'
 import { formatDoubt, formatNumber } from '@/lib/format/number'
 import type { EditionDevice } from '@/lib/method/types'
+import { PRINT_LIGHTNESS } from '@/lib/quiz/in-light'
 import { DECIMALS } from '../figure'
+
+const Y_PRINT = lightnessToY(PRINT_LIGHTNESS)
 
 /** The page against the control paper, over the light that falls on both. */
 export function InYourLight({
@@ -32,8 +36,8 @@ export function InYourLight({
         </p>
         <p className="mt-3 text-small text-soft">
           The chart shows how many times more contrast the page gives than the eye needs, with its front light off,
-          beside the control paper printed in the same ink; normal text and usual eyes.{' '}
-          <Link href="/method#reserve">How it is worked out</Link>.
+          beside the control paper printed in an ink of L* {formatNumber(PRINT_LIGHTNESS)} (house); normal text and
+          usual eyes. <Link href="/method#reserve">How it is worked out</Link>.
         </p>
         <p className="mt-3 text-small text-soft">{frontLightInWords(device)}</p>
       </div>
@@ -42,9 +46,9 @@ export function InYourLight({
           curves={[
             { name: device.name, style: 'first', points: ladderPoints({ yPage: yPage.value, yInk: yInk.value }) },
             {
-              name: 'Control paper, same ink',
+              name: 'Control paper',
               style: 'second',
-              points: ladderPoints({ yPage: yPaper, yInk: yInk.value }),
+              points: ladderPoints({ yPage: yPaper, yInk: Y_PRINT }),
             },
           ]}
           bands={READING_BANDS}

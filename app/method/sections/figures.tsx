@@ -1,12 +1,14 @@
 import { D65_10 } from '@/lib/colour/white'
-import { WHITENESS_D65_10, WHITENESS_LIMITS } from '@/lib/colour/whiteness'
+import { WHITENESS_D65_10, WHITENESS_FACTORS, WHITENESS_LIMITS } from '@/lib/colour/whiteness'
 import { formatExact as n } from '@/lib/format/number'
 import { METHOD } from '@/lib/method/constants'
+import { GRUBBS_ALPHA } from '@/lib/stats/grubbs'
 import { COLOUR_CONSTANTS } from '../constants'
 import { ConstantsTable } from '../constants-table'
 import { Formula, MethodSection, Prose } from '../parts'
 
 const { xn, yn, tintX } = WHITENESS_D65_10
+const { x: toX, y: toY, tintY } = WHITENESS_FACTORS
 const { lowest, perY, belowY, tintLowest, tintHighest } = WHITENESS_LIMITS
 const { coverage, unitFloor, leastReadings, leastLightness } = METHOD.figures
 
@@ -24,9 +26,9 @@ export function FiguresSection() {
         <p>
           A <em>set</em> is one unit, one position, one state and one session, with at least {n(leastReadings.value)}{' '}
           readings. Nothing is deleted: a reading is left out only for a reason that stays beside it, and stays visible
-          itself. Grubbs’ two-sided test at α = 0.05 flags, a person decides. A set’s figure is the mean of its accepted
-          readings, a unit’s the mean of its sets, a device’s the mean of its units. While measuring, the bench shows
-          the half-width t·s/√n (Student, 95 %).
+          itself. Grubbs’ two-sided test at α = {n(GRUBBS_ALPHA)} flags, a person decides. A set’s figure is the mean of
+          its accepted readings, a unit’s the mean of its sets, a device’s the mean of its units. While measuring, the
+          bench shows the half-width t·s/√n (Student, 95 %).
         </p>
         <p>
           The doubt of a figure has three parts. What is the <strong>device’s own</strong> comes from how much readings
@@ -65,10 +67,10 @@ export function FiguresSection() {
       </Prose>
       <Formula>
         <var>W</var>
-        <sub>10</sub> = <var>Y</var> + 800({n(xn)} − <var>x</var>) + 1700({n(yn)} − <var>y</var>)
+        <sub>10</sub> = <var>Y</var> + {n(toX)}({n(xn)} − <var>x</var>) + {n(toY)}({n(yn)} − <var>y</var>)
         <br />
         <var>T</var>
-        <sub>10</sub> = {n(tintX)}({n(xn)} − <var>x</var>) − 650({n(yn)} − <var>y</var>)
+        <sub>10</sub> = {n(tintX)}({n(xn)} − <var>x</var>) − {n(tintY)}({n(yn)} − <var>y</var>)
         <br />
         stated limits: {n(lowest)} &lt; <var>W</var>
         <sub>10</sub> &lt; {n(perY)}

@@ -1,11 +1,18 @@
 import { formatExact as n } from '@/lib/format/number'
 import { METHOD } from '@/lib/method/constants'
-import { contrastReserve, MODEL_RANGE, THRESHOLD_MODEL, thresholdContrast } from '@/lib/vision/contrast-reserve'
+import {
+  contrastReserve,
+  MODEL_RANGE,
+  pupilRadius,
+  retinalIlluminance,
+  THRESHOLD_MODEL,
+  thresholdContrast,
+} from '@/lib/vision/contrast-reserve'
 import { VISION_CONSTANTS } from '../constants'
 import { ConstantsTable } from '../constants-table'
 import { Formula, MethodSection, Prose } from '../parts'
 
-const { pupil, lens, log, size } = THRESHOLD_MODEL
+const { pupil, lens, ageing, log, size } = THRESHOLD_MODEL
 const { spotReading, fluentReading, bestReading } = METHOD.reserve
 
 /** The model worked once, so that others can hold their own arithmetic to ours. */
@@ -13,6 +20,8 @@ const CHECK = { luminance: 10, age: 40, size: 4.8 }
 const CHECK_CONTRAST = 0.9
 
 export function ReserveSection() {
+  const radius = pupilRadius(CHECK.luminance)
+  const troland = retinalIlluminance(CHECK.luminance, CHECK.age)
   const threshold = thresholdContrast(CHECK)
   const reserve = contrastReserve({ ...CHECK, contrast: CHECK_CONTRAST })
   return (
@@ -36,7 +45,8 @@ export function ReserveSection() {
         <sub>2</sub> = log log(10·<var>I</var>/π)
         <br />
         <var>C</var>
-        <sub>t</sub> = (1 + 0.113/45·(<var>A</var> − {n(lens.baseAge)})) · 10<sup>q</sup>, with
+        <sub>t</sub> = (1 + {n(ageing.rise)}/{n(ageing.overYears)}·(<var>A</var> − {n(lens.baseAge)})) · 10<sup>q</sup>,
+        with
         <br />
         <var>q</var> = {n(log.constant)} {term(log.size)}
         <var>p</var>
@@ -59,8 +69,9 @@ export function ReserveSection() {
         <p>
           R is 0 where the page is darker than {n(MODEL_RANGE.lowestLuminance)} cd/m², or log(10·I/π) is under{' '}
           {n(MODEL_RANGE.lowestLogRetinal)}: there the model says nothing. To check your own arithmetic: at A{' '}
-          {n(CHECK.age)}, ω {n(CHECK.size)}, L {n(CHECK.luminance)}, C<sub>t</sub> is {n(Number(threshold.toFixed(8)))},
-          and a contrast of {n(CHECK_CONTRAST)} has the reserve {n(Number(reserve.toFixed(3)))}.
+          {n(CHECK.age)}, ω {n(CHECK.size)}, L {n(CHECK.luminance)}, r is {n(Number(radius.toFixed(6)))}, I is{' '}
+          {n(Number(troland.toFixed(6)))}, C<sub>t</sub> is {n(Number(threshold.toFixed(8)))}, and a contrast of{' '}
+          {n(CHECK_CONTRAST)} has the reserve {n(Number(reserve.toFixed(3)))}.
         </p>
         <p>
           Reading is possible in spots from a reserve of {n(spotReading.value)}, fluent from {n(fluentReading.value)},

@@ -6,6 +6,7 @@ import { ConstantsTable } from '../constants-table'
 import { Formula, MethodSection, Prose } from '../parts'
 
 const W = METHOD.weights
+const F = W.adaptation.value
 const places = rankOrderCentroid(AIMS.length).map((weight) => n(Number(weight.toFixed(4))))
 
 export function WeightsSection() {
@@ -52,13 +53,17 @@ export function WeightsSection() {
         <sub>L</sub>({n(W.referenceLux.value)}))<sup>{n(W.colourfulnessPower.value)}</sup>
         <br />
         <var>L</var>
-        <sub>A</sub> = {n(W.adaptingShare.value)}·<var>E</var>/π; <var>k</var> = 1/(5<var>L</var>
+        <sub>A</sub> = {n(W.adaptingShare.value)}·<var>E</var>/π; <var>k</var> = 1/({n(F.light)}
+        <var>L</var>
         <sub>A</sub> + 1); <var>F</var>
-        <sub>L</sub> = 0.2<var>k</var>
-        <sup>4</sup>·5<var>L</var>
-        <sub>A</sub> + 0.1(1 − <var>k</var>
-        <sup>4</sup>)²(5<var>L</var>
-        <sub>A</sub>)<sup>1/3</sup>
+        <sub>L</sub> = {n(F['low light'])}
+        <var>k</var>
+        <sup>4</sup>·{n(F.light)}
+        <var>L</var>
+        <sub>A</sub> + {n(F['high light'])}(1 − <var>k</var>
+        <sup>4</sup>)²({n(F.light)}
+        <var>L</var>
+        <sub>A</sub>)<sup>1/{n(F.root)}</sup>
       </Formula>
       <Prose>
         <p>Under a front light the page’s tint mixes with the colour of the lamp, which the sphere does not see.</p>

@@ -57,7 +57,9 @@ export function NearMisses({ result, level }: { result: Result; level: 2 | 3 }) 
       </ul>
       {misses.length > MOST_MISSES && (
         <p className="mt-2 text-small text-soft">
-          {formatNumber(misses.length - MOST_MISSES)} more fail one limit alone and would fit less well.
+          {misses.length - MOST_MISSES === 1
+            ? 'One more fails one limit alone and would fit less well.'
+            : `${formatNumber(misses.length - MOST_MISSES)} more fail one limit alone and would fit less well.`}
         </p>
       )}
     </div>

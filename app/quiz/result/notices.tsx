@@ -1,3 +1,4 @@
+import Link from 'next/link'
 import { Notice } from '@/components/ui/notice'
 import { formatList } from '@/lib/format/list'
 import { formatNumber, formatShare } from '@/lib/format/number'
@@ -27,7 +28,8 @@ export function Notices({ result }: { result: Result }) {
       {dark.map(({ name, frontLight }) => (
         <Notice key={name} look="warning">
           “{name}”: none of these pages can be read there{frontLight ? ', not even with a front light' : ''}. Those
-          hours count against all alike, so they say nothing about which to choose.
+          hours cut every fit by the same share; as dim light they still bear on{' '}
+          <Link href="/method#weights">how much each aim counts</Link>.
           {frontLight ? '' : ' With a front light allowed there, the order may change.'}
         </Notice>
       ))}

@@ -1,7 +1,7 @@
 import Link from 'next/link'
 import { type FigureDoubts, PointsTable } from '@/components/points-table'
 import { Disclosure } from '@/components/ui/disclosure'
-import { formatNumber } from '@/lib/format/number'
+import { formatNumber, formatShare } from '@/lib/format/number'
 import { derivedUncertainty, expandedFigure } from '@/lib/method/figure-doubts'
 import type { EditionDevice, RankedDevice } from '@/lib/method/types'
 import { resultHref } from '@/lib/quiz/moves'
@@ -25,6 +25,7 @@ export function Points({
   const doubts = Object.fromEntries(
     edition.devices.filter(({ slug }) => ranked.has(slug)).map((device) => [device.slug, doubtsOf(edition, device)]),
   )
+  const lost = lossWords(match.ranked)
   const own = resultHref(address)
   const onPage = (page: number | 'all') => `${own}${own.includes('?') ? '&' : '?'}page=${page}#points`
   const pages = paging ? Math.max(1, Math.ceil(ranked.size / paging.perPage)) : 1
@@ -40,6 +41,12 @@ export function Points({
           paging={paging ? { perPage: paging.perPage, page: Math.min(paging.page, pages), hrefFor: onPage } : undefined}
         />
       </div>
+      {lost && (
+        <p className="mt-3 max-w-[80ch]">
+          A device loses the share of its points that your unreadable hours are of all hours: {lost}. The columns show
+          what is left.
+        </p>
+      )}
       {paging && (
         <p className="mt-2 print:hidden">
           <Link href={onPage('all')} prefetch={false}>
@@ -64,6 +71,16 @@ export function Points({
       </Disclosure>
     </section>
   )
+}
+
+/** How much of the points unreadable hours take, in words; null where they take nothing from anybody. */
+function lossWords(ranked: readonly RankedDevice[]): string | null {
+  const losses = ranked.map(({ unreadable }) => unreadable).filter((share) => share < 1)
+  const [least, most] = [Math.min(...losses), Math.max(...losses)]
+  if (!(most > 0)) return null
+  return least === most || formatShare(least) === formatShare(most)
+    ? `here ${formatShare(most)} for each of them`
+    : `here ${formatShare(least)} to ${formatShare(most)}`
 }
 
 function doubtsOf({ uncertainty }: Result['edition'], device: EditionDevice): FigureDoubts {

@@ -33,7 +33,7 @@ export function Verdict({
     <section className="band" aria-labelledby="verdict">
       <div className="measure grid gap-x-10 gap-y-8 py-10 lg:grid-cols-[17.5rem_minmax(0,1fr)_14rem] print:block print:py-0">
         <div>
-          <p className="text-brass-lit">{tieWords(group.length, ranked.length)}</p>
+          <p className="text-brass-lit">{tieWords(group.length, first.tiedWith.length, ranked.length)}</p>
           <h1 id="verdict" className="mt-2 text-h1 sm:text-display print:mt-0 print:text-h2">
             {device.name.replace(/ (\d+)$/, '\u00a0$1')}
             {MARGIN_WORDS[margin] && (
@@ -50,6 +50,11 @@ export function Verdict({
           {rivals && (
             <p className="mt-5 max-w-[58ch] border-l-3 border-brass-lit pl-4 print:mt-1 print:mb-2 print:max-w-none">
               {rivals}
+            </p>
+          )}
+          {device.onSale === false && (
+            <p className="mt-3 max-w-[58ch] print:mt-1 print:max-w-none">
+              It is no longer sold: you would have to find one second hand.
             </p>
           )}
           {device.provisional && (
@@ -84,8 +89,8 @@ export function Verdict({
   )
 }
 
-function tieWords(level: number, all: number): string {
+function tieWords(level: number, ties: number, all: number): string {
   if (all === 1) return 'The only device left'
-  if (level < 2) return 'Ahead of each of the others in at least 95 of 100 draws'
-  return `${formatNumber(level)} devices are too close to call for you`
+  if (level < 2 && ties === 0) return 'Ahead of each of the others in at least 95 of 100 draws'
+  return `${formatNumber(Math.max(level, ties + 1))} devices are too close to call for you`
 }

@@ -40,6 +40,11 @@ test.each([
     list: [ranked('a', 80, 0.4, ['b', 'c']), ranked('b', 78, 0.3, ['a']), ranked('c', 78, 0.3, ['a'])],
     margin: 'whisker',
   },
+  {
+    name: 'ahead by less than a point, yet in most draws',
+    list: [ranked('a', 80, 0.88, ['b']), ranked('b', 79.3, 0.12, ['a'])],
+    margin: 'little',
+  },
   { name: 'ahead by a little', list: [ranked('a', 80, 0.9, ['b']), ranked('b', 78, 0.1, ['a'])], margin: 'little' },
 ] as const)('a first place is told as $margin where it is $name', ({ list, margin }) => {
   expect(marginOf(list)).toBe(margin)

@@ -23,7 +23,10 @@ test('a reader’s answers are told back in words, and only those given', () => 
     ],
     ['Light', 'more than others want'],
     ['Type', 'small'],
-    ['What matters', '1st being clear in your light; 2nd being white, not grey and being free of tint'],
+    [
+      'What matters',
+      '1st being clear in your light; 2nd being white, not grey and being free of tint; the other behind',
+    ],
     ['White', 'warm white'],
     [
       'Limits',
