@@ -18,20 +18,6 @@ export function expandedFigure(u: number, session: number, shares: Record<string
   return expandedUncertainty([u, session * together(shares), common], K)
 }
 
-/**
- * Expanded uncertainty of the difference of two devices in one channel: the common part drops out, and the session
- * part where the two share a session.
- */
-export function expandedDifference(
-  one: { u: number; sessions: Record<string, number> },
-  other: { u: number; sessions: Record<string, number> },
-  session: number,
-): number {
-  const ids = [...new Set([...Object.keys(one.sessions), ...Object.keys(other.sessions)])]
-  const apart = Math.hypot(...ids.map((id) => (one.sessions[id] ?? 0) - (other.sessions[id] ?? 0)))
-  return expandedUncertainty([one.u, other.u, session * apart], K)
-}
-
 /** √Σ share²: the independent errors of several sessions, each by its share. */
 function together(shares: Record<string, number>): number {
   return Math.hypot(...Object.values(shares))

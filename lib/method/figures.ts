@@ -5,7 +5,7 @@ import { requireFigures } from './derived-figures'
 import type { Lab, MeasuredState } from './types'
 
 export { besidePaper, type DerivedFigures, derivedFigures } from './derived-figures'
-export { besidePaperUncertainty, derivedUncertainty, expandedDifference, expandedFigure } from './figure-doubts'
+export { besidePaperUncertainty, derivedUncertainty, expandedFigure } from './figure-doubts'
 
 /** One set: accepted readings (n ≥ 1) of one state at one position of one unit, in one session. */
 export type SetReadings = {

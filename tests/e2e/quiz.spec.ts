@@ -180,7 +180,7 @@ test('the shortlist follows the answers, with doubts, ties, and what fell out an
     page.getByText(`${inColour} of ${devices.length} devices are left`, { exact: false }).first(),
   ).toBeVisible()
   await expect(shortlist(page).first()).not.toHaveText(before)
-  await page.getByText('left out by your limits').click()
+  await page.getByText('left out, and why').click()
   await expect(page.getByRole('complementary').getByText('is not in colour').first()).toBeVisible()
   await expect(shortlist(page).first()).toContainText('give or take')
 })

@@ -8,7 +8,6 @@ import {
   derivedFigures,
   derivedUncertainty,
   deviceFigures,
-  expandedDifference,
   expandedFigure,
   pooledComponents,
   type SetReadings,
@@ -131,13 +130,6 @@ describe('expanded uncertainty', () => {
   test('of a figure', () => {
     expect(expandedFigure(0.3, 0.2, { s1: 0.5, s2: 0.5 }, 0.1)).toBeCloseTo(2 * Math.sqrt(0.09 + 0.02 + 0.01), 12)
     expect(expandedFigure(0, 0.2, { s1: 1 }, 0)).toBeCloseTo(0.4, 12)
-  })
-
-  test('of a difference leaves out what two devices share', () => {
-    const one = { u: 0.3, sessions: { s1: 1 } }
-    const other = { u: 0.4, sessions: { s1: 0.5, s2: 0.5 } }
-    expect(expandedDifference(one, { ...one, u: 0.4 }, 5)).toBeCloseTo(2 * 0.5, 12)
-    expect(expandedDifference(one, other, 0.2)).toBeCloseTo(2 * Math.sqrt(0.25 + 0.04 * (0.25 + 0.25)), 12)
   })
 })
 
