@@ -10,7 +10,7 @@ const ADDRESS_DELAY_MS = 400
  */
 export function useLight(opening: number): [number, (lux: number) => void] {
   const params = useSearchParams()
-  const inAddress = lightFrom({ lux: params.get('lux') ?? undefined, step: params.get('step') ?? undefined })
+  const inAddress = lightFrom({ lux: only(params.getAll('lux')), step: only(params.getAll('step')) })
   const [lux, setLux] = useState(opening)
   const written = useRef(opening)
 
@@ -30,4 +30,9 @@ export function useLight(opening: number): [number, (lux: number) => void] {
   }, [lux, inAddress])
 
   return [lux, setLux]
+}
+
+/** The one value of a parameter, as the server takes it: given twice it is not understood. */
+function only(values: string[]): string | undefined {
+  return values.length === 1 ? values[0] : undefined
 }

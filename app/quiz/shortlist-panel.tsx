@@ -95,7 +95,10 @@ function Assumed({ assumptions: { open, unsure, words } }: { assumptions: Shortl
         </p>
       )}
       <p>
-        {open.length > 0 ? 'Until then we' : 'We'} assume {words}. <Link href="/method#spots">Why these</Link>
+        {open.length > 0 ? 'Until then we' : 'We'} assume {words}.{' '}
+        <Link prefetch={false} href="/method#spots">
+          Why these
+        </Link>
       </p>
     </div>
   )

@@ -30,7 +30,7 @@ export function Footer({ theme }: { theme: Theme | null }) {
           <ul className="grid text-small">
             {ROOMS.map((room) => (
               <li key={room.href}>
-                <Link href={room.href} className="inline-flex min-h-9 items-center">
+                <Link prefetch={false} href={room.href} className="inline-flex min-h-9 items-center">
                   {room.name}
                 </Link>
               </li>

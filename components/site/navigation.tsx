@@ -4,13 +4,17 @@ import Link from 'next/link'
 import { usePathname } from 'next/navigation'
 import { isIn, ROOMS } from './rooms'
 
-/** The rooms in a line; the one we are in is marked, by the server too, so it needs no JavaScript. */
+/**
+ * The rooms in a line; the one we are in is marked, by the server too, so it needs no JavaScript. Nothing is fetched
+ * ahead: such a request tells the server where the reader is, and in the quiz that is what they answered.
+ */
 export function WideNavigation() {
   const pathname = usePathname()
   return (
     <nav aria-label="Main" className="hidden gap-6 self-stretch text-small sm:flex">
       {ROOMS.map((room) => (
         <Link
+          prefetch={false}
           key={room.href}
           href={room.href}
           aria-current={isIn(room, pathname) ? 'page' : undefined}
@@ -37,6 +41,7 @@ export function PhoneNavigation() {
       >
         {ROOMS.map((room) => (
           <Link
+            prefetch={false}
             key={room.href}
             href={room.href}
             aria-current={isIn(room, pathname) ? 'page' : undefined}
