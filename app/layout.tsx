@@ -1,4 +1,5 @@
 import type { Metadata, Viewport } from 'next'
+import { connection } from 'next/server'
 import type { ReactNode } from 'react'
 import { Footer } from '@/components/site/footer'
 import { Masthead } from '@/components/site/masthead'
@@ -7,11 +8,15 @@ import { chosenTheme } from '@/lib/server/theme'
 import { fontVariables } from './fonts'
 import './globals.css'
 
-export const metadata: Metadata = {
-  metadataBase: new URL(config.baseUrl),
-  title: { default: 'Lampleaf: find the page that suits your light', template: '%s · Lampleaf' },
-  description:
-    'How light, how white and how tinted the pages of electronic-paper reading devices are, measured, each figure with its doubt, and a quiz that finds the page for the light you read in.',
+export async function generateMetadata(): Promise<Metadata> {
+  // The site's own address is known to a running process, not to a build.
+  await connection()
+  return {
+    metadataBase: new URL(config().baseUrl),
+    title: { default: 'Lampleaf: find the page that suits your light', template: '%s · Lampleaf' },
+    description:
+      'How light, how white and how tinted the pages of electronic-paper reading devices are, measured, each figure with its doubt, and a quiz that finds the page for the light you read in.',
+  }
 }
 
 export const viewport: Viewport = { width: 'device-width', initialScale: 1 }

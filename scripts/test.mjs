@@ -75,9 +75,7 @@ async function vitest(env) {
 
 async function browser(databases) {
   console.log('\nBrowser tests')
-  await step('Build', () =>
-    buildSite({ distDir: DIST, env: { LAMPLEAF_SPECIMEN: '1', DATABASE_URL: databases.browser, LAMPLEAF_DEMO: '1' } }),
-  )
+  await step('Build', () => buildSite({ distDir: DIST, env: { LAMPLEAF_SPECIMEN: '1' } }))
   const site = async (databaseUrl) => {
     const port = await freePort(3400 + Math.floor(Math.random() * 400))
     const env = { DATABASE_URL: databaseUrl, LAMPLEAF_DEMO: '1', BASE_URL: `http://127.0.0.1:${port}` }

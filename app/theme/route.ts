@@ -18,7 +18,7 @@ export async function POST(request: Request): Promise<Response> {
   if (!theme && choice !== 'automatic')
     return refuse(400, 'Send theme as one of day, night, paper or automatic, from a form.')
 
-  const secure = config.baseUrl.startsWith('https:') ? '; Secure' : ''
+  const secure = config().baseUrl.startsWith('https:') ? '; Secure' : ''
   return new Response(null, {
     status: 303,
     headers: {

@@ -1,5 +1,13 @@
 import 'server-only'
-import { parseConfig } from '@/lib/config'
+import { type Config, parseConfig } from '@/lib/config'
 
-/** The site's configuration, read once; a wrong or missing variable stops the process with its name. */
-export const config = parseConfig(process.env)
+let known: Config | undefined
+
+/**
+ * The site's configuration, read when it is first asked for: a build loads the pages too, and needs none of it. A web
+ * process has been refused at its start where a variable is missing (lib/boot.ts).
+ */
+export function config(): Config {
+  known ??= parseConfig(process.env)
+  return known
+}

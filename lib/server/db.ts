@@ -1,12 +1,16 @@
 import 'server-only'
-import { connect } from '@/db/client'
+import { connect, type Db } from '@/db/client'
 import { config } from './config'
 import { withDeadline } from './deadline'
 
 const globals = globalThis as { lampleafDatabase?: ReturnType<typeof connect> }
-// Development reloads modules; the connections must survive that or they pile up.
-globals.lampleafDatabase ??= connect(config.databaseUrl, { max: config.databasePool, applicationName: 'lampleaf-web' })
-const { db } = globals.lampleafDatabase
+
+function connection(): Db {
+  const { databaseUrl, databasePool } = config()
+  // Development reloads modules; the connections must survive that or they pile up.
+  globals.lampleafDatabase ??= connect(databaseUrl, { max: databasePool, applicationName: 'lampleaf-web' })
+  return globals.lampleafDatabase.db
+}
 
 /** Milliseconds a page waits for the database before it says so. */
 const READ_DEADLINE_MS = 5000
@@ -16,6 +20,6 @@ const READ_DEADLINE_MS = 5000
  * so every read has a deadline.
  * @throws DeadlineExceeded after five seconds; the driver's own error before that
  */
-export function read<T>(query: (connection: typeof db) => Promise<T>): Promise<T> {
-  return withDeadline(query(db), READ_DEADLINE_MS, 'The database did not answer')
+export function read<T>(query: (db: Db) => Promise<T>): Promise<T> {
+  return withDeadline(query(connection()), READ_DEADLINE_MS, 'The database did not answer')
 }

@@ -24,7 +24,7 @@ function pool(): Piscina {
     // Bundled by scripts/build-worker.mjs: a thread cannot read what the site's own bundler made.
     filename: join(process.cwd(), 'build', 'match-worker.mjs'),
     minThreads: 0,
-    maxThreads: config.matchThreads,
+    maxThreads: config().matchThreads,
     idleTimeout: 60_000,
     maxQueue: MAX_WAITING,
   })

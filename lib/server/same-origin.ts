@@ -26,14 +26,14 @@ export function ownReferer(headers: Headers): string {
 
 /** A path and query on this site as a form gave it; null for anything that could lead elsewhere, or nowhere. */
 export function ownPath(path: string | null): string | null {
-  if (!path?.startsWith('/') || !URL.canParse(path, config.baseUrl)) return null
-  const { origin, pathname, search } = new URL(path, config.baseUrl)
-  return origin === config.baseUrl && !pathname.startsWith('//') ? pathname + search : null
+  if (!path?.startsWith('/') || !URL.canParse(path, config().baseUrl)) return null
+  const { origin, pathname, search } = new URL(path, config().baseUrl)
+  return origin === config().baseUrl && !pathname.startsWith('//') ? pathname + search : null
 }
 
 /** Ours is the configured origin, or the very host this request was sent to: a page elsewhere can fake neither. */
 function isOurs(address: string, headers: Headers): boolean {
   if (!URL.canParse(address)) return false
   const { origin, host, protocol } = new URL(address)
-  return origin === config.baseUrl || (/^https?:$/.test(protocol) && host === headers.get('host'))
+  return origin === config().baseUrl || (/^https?:$/.test(protocol) && host === headers.get('host'))
 }

@@ -54,7 +54,7 @@ export function FinePrint({ result }: { result: Result }) {
           </p>
         )}
         <p className="mt-1 hidden text-note wrap-anywhere print:block">
-          {config.baseUrl}
+          {config().baseUrl}
           {resultHref(address)}
         </p>
         {address.unknown.length > 0 && (
