@@ -28,9 +28,11 @@ async function start() {
     await step('Demo data', async () => lastLine(await tsx('seed/load.ts', env, ['--if-empty'])))
   }
   await step('Build', () => buildSite({ distDir: '.next' }))
+  let isUp = false
   const address = await step('Site', () =>
-    startSite({ distDir: '.next', port, env, log: (text) => process.stderr.write(text), onExit: siteStopped }),
+    startSite({ distDir: '.next', port, env, log: (text) => isUp && process.stderr.write(text), onExit: siteStopped }),
   )
+  isUp = true
   console.log(`\nLampleaf is at ${address}\nPress Ctrl-C to stop it and everything it started.`)
 }
 

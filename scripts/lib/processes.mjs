@@ -82,8 +82,19 @@ function stop(child) {
   })
 }
 
-/** Ctrl-C, a closed terminal and a polite kill all end in stopEverything. */
+/**
+ * Ctrl-C, a closed terminal and a polite kill all end in stopEverything; so does the end of whoever started us, since
+ * npm passes a kill to its shell, and the shell to nobody.
+ */
 export function stopOnSignals() {
+  const parent = process.ppid
+  const watch = setInterval(async () => {
+    if (process.ppid === parent) return
+    clearInterval(watch)
+    await stopEverything()
+    process.exit(143)
+  }, 1000)
+  watch.unref()
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     process.on(signal, async () => {
       await stopEverything()
