@@ -1,3 +1,4 @@
+import { COVERAGE_FACTOR } from '@/lib/stats/uncertainty'
 import { READING_ANCHORS } from '@/lib/vision/contrast-reserve'
 
 /**
@@ -40,7 +41,7 @@ const FIGURES = {
   modelsForUnitSpread: house('Models with two or more units from which the floor is dropped', 3),
   coverage: {
     name: 'Coverage factor k of an expanded uncertainty',
-    value: 2,
+    value: COVERAGE_FACTOR,
     source: 'JCGM 100:2008, 6.2',
     standing: 'published',
     note: 'About 95 %.',
