@@ -3,5 +3,7 @@ export async function register() {
   if (process.env.NEXT_RUNTIME === 'nodejs') {
     const { requireConfig } = await import('@/lib/boot')
     requireConfig()
+    const { keepOnePolicy } = await import('@/lib/one-policy')
+    keepOnePolicy()
   }
 }

@@ -1,15 +1,35 @@
+import { fileURLToPath } from 'node:url'
 import type { NextConfig } from 'next'
+import { CATALOGUE_KEYS } from './lib/catalogue/keys'
+import { DEFAULT_LOOK, LOOK_COOKIE, LOOKS, lookName } from './lib/look'
+import { contentSecurityPolicy } from './lib/page-policy.mjs'
 
 /** Pages named *.specimen.tsx are for those who build the site; a production build does not contain them. */
-const withSpecimen = process.env.NODE_ENV !== 'production' || process.env.LAMPLEAF_SPECIMEN === '1'
+const development = process.env.NODE_ENV !== 'production'
+const withSpecimen = development || process.env.LAMPLEAF_SPECIMEN === '1'
 
-/** Headers every answer carries. The tight script policy is not among them yet. */
+/** Headers every answer carries. A page brings a policy that knows its scripts; whatever does not may run none inline. */
 const securityHeaders = [
+  ...(development ? [] : [{ key: 'Content-Security-Policy', value: contentSecurityPolicy() }]),
   { key: 'X-Content-Type-Options', value: 'nosniff' },
   { key: 'Referrer-Policy', value: 'strict-origin-when-cross-origin' },
   { key: 'X-Frame-Options', value: 'DENY' },
   { key: 'Permissions-Policy', value: 'camera=(), microphone=(), geolocation=(), payment=()' },
+  { key: 'Cross-Origin-Opener-Policy', value: 'same-origin' },
 ]
+
+const anyLook = LOOKS.map(lookName).join('|')
+/** Every address of a page: not a file, a machine's address, or one that already names a look. */
+const page = `/:path((?!(?:${anyLook}|_next|api|look)(?:/|$))[^.]*)`
+
+/** Where an address with any of these queries is answered: by a page made for the request, not by the stored one. */
+function inner(source: string, page: string, keys: readonly string[]) {
+  const chosen = { type: 'cookie' as const, key: LOOK_COOKIE, value: `(?<look>${anyLook})` }
+  return keys.flatMap((key) => [
+    { source, has: [{ type: 'query' as const, key }, chosen], destination: `/:look${page}` },
+    { source, has: [{ type: 'query' as const, key }], destination: `/${lookName(DEFAULT_LOOK)}${page}` },
+  ])
+}
 
 const config: NextConfig = {
   // The browser tests build beside a running site, so each build may have a folder of its own.
@@ -22,8 +42,29 @@ const config: NextConfig = {
   // The image optimizer has had remote code execution advisories, and nothing here needs it.
   images: { unoptimized: true },
   serverExternalPackages: ['postgres', 'piscina'],
+  cacheHandler: development ? undefined : fileURLToPath(new URL('./lib/page-cache.mjs', import.meta.url)),
   async headers() {
     return [{ source: '/:path*', headers: securityHeaders }]
+  },
+  async redirects() {
+    // The inner addresses are nobody's business but ours.
+    return [{ source: `/:look(${anyLook})/:path*`, destination: '/:path*', permanent: false }]
+  },
+  async rewrites() {
+    return {
+      beforeFiles: [
+        ...inner('/', '/lit', ['lux', 'step']),
+        ...inner('/devices', '/devices/found', CATALOGUE_KEYS),
+        {
+          source: page,
+          has: [{ type: 'cookie', key: LOOK_COOKIE, value: `(?<look>${anyLook})` }],
+          destination: '/:look/:path',
+        },
+        { source: page, destination: `/${lookName(DEFAULT_LOOK)}/:path` },
+      ],
+      afterFiles: [],
+      fallback: [{ source: `/:look(${anyLook})/:path*`, destination: '/:look/not-here' }],
+    }
   },
 }
 

@@ -1,7 +1,7 @@
 import Link from 'next/link'
-import type { Theme } from '@/lib/theme'
+import type { Look } from '@/lib/look'
+import { LookChoice } from './look-choice'
 import { ROOMS } from './rooms'
-import { ThemeChoice } from './theme-choice'
 
 const CAUTIONS = [
   'Not medical advice. Sudden changes in sight, pain or haloes belong to an eye-care professional.',
@@ -12,7 +12,7 @@ const CAUTIONS = [
 ]
 
 /** The cautions the product always carries, the rooms, the choice of theme, and that all of it is invented. */
-export function Footer({ theme }: { theme: Theme | null }) {
+export function Footer({ look }: { look: Look }) {
   return (
     <footer className="mt-16 border-t border-rule bg-sheet py-10">
       <div className="measure grid gap-10 md:grid-cols-[1.6fr_0.7fr_1.2fr]">
@@ -42,7 +42,7 @@ export function Footer({ theme }: { theme: Theme | null }) {
             </li>
           </ul>
         </nav>
-        <ThemeChoice theme={theme} />
+        <LookChoice look={look} />
       </div>
       <p className="measure mt-10 text-note text-soft">
         All devices, makers and figures here are invented for demonstration.

@@ -2,6 +2,7 @@
 
 import Link from 'next/link'
 import { usePathname } from 'next/navigation'
+import { publicPath } from '@/lib/look'
 import { isIn, ROOMS } from './rooms'
 
 /**
@@ -9,7 +10,7 @@ import { isIn, ROOMS } from './rooms'
  * ahead: such a request tells the server where the reader is, and in the quiz that is what they answered.
  */
 export function WideNavigation() {
-  const pathname = usePathname()
+  const pathname = publicPath(usePathname())
   return (
     <nav aria-label="Main" className="hidden gap-6 self-stretch text-small sm:flex">
       {ROOMS.map((room) => (
@@ -29,7 +30,7 @@ export function WideNavigation() {
 
 /** The same behind a button on a phone. Going to another page closes it: `key` makes a new, closed one. */
 export function PhoneNavigation() {
-  const pathname = usePathname()
+  const pathname = publicPath(usePathname())
   return (
     <details key={pathname} className="group/menu ml-auto sm:hidden">
       <summary className="flex min-h-11 cursor-pointer list-none items-center rounded-card border border-edge px-4 font-semibold group-open/menu:bg-tint [&::-webkit-details-marker]:hidden">

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import { type DeviceRow, parseSort, SORTS, sortHref, sortRows } from '@/app/devices/sort'
+import { type DeviceRow, parseSort, SORTS, sortHref, sortRows } from '@/app/[look]/devices/sort'
 import { publishedFigures } from '@/lib/findings/published'
 import { makeDevice, makeEdition } from '../fixtures/edition'
 

@@ -1,7 +1,7 @@
 import { renderToStaticMarkup } from 'react-dom/server'
 import { describe, expect, test } from 'vitest'
-import MethodPage from '@/app/method/page'
-import { QUANTITIES } from '@/app/method/quantities'
+import MethodPage from '@/app/[look]/method/page'
+import { QUANTITIES } from '@/app/[look]/method/quantities'
 import { editionSchema } from '@/lib/contract/edition'
 import { matchAnswerSchema } from '@/lib/contract/match-answer'
 import { formatExact } from '@/lib/format/number'
@@ -114,7 +114,7 @@ describe('every figure we publish has its method described', () => {
     const quantity = QUANTITIES.find((one) =>
       one.fields.some((named) => field === named || field.startsWith(`${named}.`)),
     )
-    expect(quantity, 'a quantity in app/method/quantities.ts').toBeDefined()
+    expect(quantity, 'a quantity in app/[look]/method/quantities.ts').toBeDefined()
     expect(html).toContain(`id="q-${quantity?.id}"`)
     expect(text).toContain(quantity?.how)
   })

@@ -9,7 +9,7 @@ export async function expectAccessible(page: Page, path: string): Promise<void> 
   const { baseURL } = test.info().project.use
   const url = new URL(path, baseURL)
   for (const theme of THEMES) {
-    await page.context().addCookies([{ name: 'theme', value: theme, url: url.origin }])
+    await page.context().addCookies([{ name: 'look', value: `${theme}-metric`, url: url.origin }])
     await page.goto(url.href)
     const { violations } = await new AxeBuilder({ page }).withTags(RULES).analyze()
     expect(

@@ -1,6 +1,6 @@
 import AxeBuilder from '@axe-core/playwright'
 import { expect, type Locator, type Page, test } from '@playwright/test'
-import { THEMES } from '@/lib/theme'
+import { THEMES } from '@/lib/look'
 import { fromAddress } from './site'
 
 const heading = (page: Page) => page.getByRole('heading', { level: 1 })
@@ -391,7 +391,7 @@ test.describe('on a narrow page', () => {
 for (const theme of THEMES) {
   test(`every step is free of accessibility violations in the ${theme} theme`, async ({ page, context, baseURL }) => {
     test.slow()
-    await context.addCookies([{ name: 'theme', value: theme, url: baseURL! }])
+    await context.addCookies([{ name: 'look', value: `${theme}-metric`, url: baseURL! }])
     for (const query of [
       'step=1',
       'step=2&train=4&own1=2&own1.lux=80',

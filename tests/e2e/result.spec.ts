@@ -1,6 +1,6 @@
 import AxeBuilder from '@axe-core/playwright'
 import { expect, type Page, test } from '@playwright/test'
-import { THEMES } from '@/lib/theme'
+import { THEMES } from '@/lib/look'
 import { fromAddress } from './site'
 
 const heading = (page: Page) => page.getByRole('heading', { level: 1 })
@@ -238,7 +238,7 @@ for (const theme of THEMES) {
     baseURL,
   }) => {
     test.slow()
-    await context.addCookies([{ name: 'theme', value: theme, url: baseURL! }])
+    await context.addCookies([{ name: 'look', value: `${theme}-metric`, url: baseURL! }])
     for (const query of [
       'bed-lamp=7&train=4&budget=250&bed-dark=1&bed-dark.light=off',
       'bed-lamp=7&weight.tint=1',
@@ -261,7 +261,7 @@ for (const theme of THEMES) {
 }
 
 test('the paper theme has numbered pages in place of a long scroll', async ({ page, context, baseURL }) => {
-  await context.addCookies([{ name: 'theme', value: 'paper', url: baseURL! }])
+  await context.addCookies([{ name: 'look', value: 'paper-metric', url: baseURL! }])
   await page.goto(RESULT)
   await expect(page.getByText(/Devices 1–6 of \d+, page 1 of \d/)).toBeVisible()
   await page.getByRole('link', { name: 'Next page' }).click()

@@ -5,7 +5,7 @@ let post: (request: Request) => Promise<Response>
 beforeAll(async () => {
   vi.stubEnv('DATABASE_URL', 'postgres://nobody@127.0.0.1:1/none')
   vi.stubEnv('BASE_URL', 'https://lampleaf.example')
-  post = (await import('@/app/theme/route')).POST
+  post = (await import('@/app/look/route')).POST
 })
 
 const SITE = 'https://lampleaf.example'
@@ -17,7 +17,7 @@ function send(headers: Record<string, string>, body = 'theme=night') {
     host: 'lampleaf.example',
     ...headers,
   }
-  return post(new Request(`${SITE}/theme`, { method: 'POST', headers: sent, body }))
+  return post(new Request(`${SITE}/look`, { method: 'POST', headers: sent, body }))
 }
 
 describe('choosing a theme', () => {
@@ -26,7 +26,7 @@ describe('choosing a theme', () => {
     expect(answer.status).toBe(303)
     expect(answer.headers.get('location')).toBe('/quiz/result?spots=80')
     expect(answer.headers.get('set-cookie')).toBe(
-      'theme=night; Path=/; Max-Age=31536000; SameSite=Lax; HttpOnly; Secure',
+      'look=night-metric; Path=/; Max-Age=31536000; SameSite=Lax; HttpOnly; Secure',
     )
   })
 
@@ -49,11 +49,22 @@ describe('choosing a theme', () => {
 
   test('“automatic” drops the cookie', async () => {
     const answer = await send({ origin: SITE }, 'theme=automatic')
-    expect(answer.headers.get('set-cookie')).toContain('theme=; Path=/; Max-Age=0')
+    expect(answer.headers.get('set-cookie')).toContain('look=; Path=/; Max-Age=0')
     expect(answer.headers.get('location')).toBe('/')
   })
 
-  test.each(['theme=sepia', 'theme=', 'colour=night', '{"theme":"night"}'])(
+  test('units are chosen beside the theme, and each choice keeps the other', async () => {
+    const inch = await send({ origin: SITE, cookie: 'a=1; look=night-metric' }, 'units=inch')
+    expect(inch.headers.get('set-cookie')).toContain('look=night-inch;')
+    const day = await send({ origin: SITE, cookie: 'look=night-inch' }, 'theme=day')
+    expect(day.headers.get('set-cookie')).toContain('look=day-inch;')
+    const automatic = await send({ origin: SITE, cookie: 'look=night-inch' }, 'theme=automatic')
+    expect(automatic.headers.get('set-cookie')).toContain('look=auto-inch;')
+    const junk = await send({ origin: SITE, cookie: 'look=<script>' }, 'units=inch')
+    expect(junk.headers.get('set-cookie')).toContain('look=auto-inch;')
+  })
+
+  test.each(['units=furlongs', 'theme=sepia', 'theme=', 'colour=night', '{"theme":"night"}'])(
     '%s is refused with the values that would do',
     async (body) => {
       const answer = await send({ origin: SITE }, body)

@@ -36,6 +36,9 @@ const requireDevice = cache(async (params: Props['params']) => {
   return { record, edition, device: edition?.devices.find((one) => one.slug === slug) ?? null }
 })
 
+export const dynamic = 'force-static'
+export const revalidate = 60
+
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
   const { record, edition, device } = await requireDevice(params)
   if (!edition || !device) return { title: record.name }

@@ -9,6 +9,9 @@ import { SpotsSection } from './sections/spots'
 import { UnknownsSection } from './sections/unknowns'
 import { WeightsSection } from './sections/weights'
 
+export const dynamic = 'force-static'
+export const revalidate = 60
+
 export const metadata: Metadata = {
   title: 'Method 1',
   description:

@@ -1,16 +1,14 @@
 import type { Metadata, Viewport } from 'next'
-import { connection } from 'next/server'
 import type { ReactNode } from 'react'
 import { Footer } from '@/components/site/footer'
 import { Masthead } from '@/components/site/masthead'
 import { config } from '@/lib/server/config'
-import { chosenTheme } from '@/lib/server/theme'
-import { fontVariables } from './fonts'
-import './globals.css'
+import { type LookParams, requireLook } from '@/lib/server/look'
+import { fontVariables } from '../fonts'
+import '../globals.css'
 
+/** Nothing is made at build time: the site's own address and its database are known to a running process alone. */
 export async function generateMetadata(): Promise<Metadata> {
-  // The site's own address is known to a running process, not to a build.
-  await connection()
   return {
     metadataBase: new URL(config().baseUrl),
     title: { default: 'Lampleaf: find the page that suits your light', template: '%s · Lampleaf' },
@@ -21,10 +19,12 @@ export async function generateMetadata(): Promise<Metadata> {
 
 export const viewport: Viewport = { width: 'device-width', initialScale: 1 }
 
-export default async function RootLayout({ children }: { children: ReactNode }) {
-  const theme = await chosenTheme()
+type Props = { children: ReactNode; params: Promise<LookParams> }
+
+export default async function RootLayout({ children, params }: Props) {
+  const look = await requireLook(params)
   return (
-    <html lang="en-GB" data-theme={theme ?? undefined} className={fontVariables}>
+    <html lang="en-GB" data-theme={look.theme ?? undefined} className={fontVariables}>
       <body className="flex min-h-dvh flex-col">
         <a
           href="#content"
@@ -36,7 +36,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
         <div id="content" tabIndex={-1} className="flex-1">
           {children}
         </div>
-        <Footer theme={theme} />
+        <Footer look={look} />
       </body>
     </html>
   )

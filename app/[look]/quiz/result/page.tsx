@@ -5,8 +5,8 @@ import { pairsFrom, readAddress } from '@/lib/quiz/address'
 import { resultHref } from '@/lib/quiz/moves'
 import { toRequest } from '@/lib/quiz/request'
 import { latestEdition } from '@/lib/server/editions'
+import { type LookParams, requireLook } from '@/lib/server/look'
 import { matchOnServer, TooBusy } from '@/lib/server/match'
-import { chosenTheme } from '@/lib/server/theme'
 import { Answer } from './answer'
 import { NothingLeft } from './nothing-left'
 import { NothingReadable } from './nothing-readable'
@@ -24,7 +24,9 @@ export const metadata: Metadata = {
 
 type Search = Record<string, string | string[] | undefined>
 
-export default async function ResultPage({ searchParams }: { searchParams: Promise<Search> }) {
+type Props = { params: Promise<LookParams>; searchParams: Promise<Search> }
+
+export default async function ResultPage({ params, searchParams }: Props) {
   const { page, ...search } = await searchParams
   const pairs = pairsFrom(search)
   const address = readAddress(pairs)
@@ -44,7 +46,7 @@ export default async function ResultPage({ searchParams }: { searchParams: Promi
   const result: Result = { address, answers, assumed, edition, match }
   if (match.ranked.length === 0) return <NothingLeft result={result} />
   if (match.ranked.every(({ unreadable }) => unreadable === 1)) return <NothingReadable result={result} />
-  return <Answer result={result} page={pageIn(page)} paper={(await chosenTheme()) === 'paper'} />
+  return <Answer result={result} page={pageIn(page)} paper={(await requireLook(params)).theme === 'paper'} />
 }
 
 function isWrittenAs(href: string, pairs: [string, string][]): boolean {

@@ -7,16 +7,18 @@ import { latestEdition } from '@/lib/server/editions'
 import { DevicesTable } from './devices-table'
 import { parseSort, sortRows } from './sort'
 
-export const metadata: Metadata = {
+export const catalogueMetadata: Metadata = {
   title: 'Devices',
   description:
     'Every electronic-paper reading device on the bench: lightness, whiteness, tint and contrast of its page, each measured and with its doubt.',
+  alternates: { canonical: '/devices' },
 }
 
-type Search = Promise<Record<string, string | string[] | undefined>>
+export type CatalogueSearch = Record<string, string | string[] | undefined>
 
-export default async function DevicesPage({ searchParams }: { searchParams: Search }) {
-  const [edition, search] = await Promise.all([latestEdition(), searchParams])
+/** The whole catalogue as an address asks for it. */
+export async function Catalogue({ search }: { search: CatalogueSearch }) {
+  const edition = await latestEdition()
   if (!edition) {
     return (
       <main className="measure py-12">

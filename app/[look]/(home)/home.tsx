@@ -1,22 +1,20 @@
 import { Notice } from '@/components/ui/notice'
-import { lightFrom } from '@/lib/lamp/levels'
 import type { LampDevice } from '@/lib/lamp/ranking'
 import type { EditionDevice } from '@/lib/method/types'
 import { latestEdition } from '@/lib/server/editions'
-import { Findings } from './(home)/findings'
-import { Hero } from './(home)/hero'
-import { LampStage } from './(home)/lamp-stage'
-import { SamePage } from './(home)/same-page'
+import { Findings } from './findings'
+import { Hero } from './hero'
+import { LampStage } from './lamp-stage'
+import { SamePage } from './same-page'
 
-type Search = Promise<Record<string, string | string[] | undefined>>
-
-export default async function HomePage({ searchParams }: { searchParams: Search }) {
-  const [edition, search] = await Promise.all([latestEdition(), searchParams])
+/** The home page in one light, lux on the page. */
+export async function Home({ openingLux }: { openingLux: number }) {
+  const edition = await latestEdition()
   return (
     <main>
       <Hero edition={edition}>
         {edition && edition.devices.length > 0 ? (
-          <LampStage devices={edition.devices.map(slim)} paper={edition.control.paper} openingLux={lightFrom(search)} />
+          <LampStage devices={edition.devices.map(slim)} paper={edition.control.paper} openingLux={openingLux} />
         ) : (
           <Notice className="self-center">
             No edition has been released yet, so there are no pages to show. The bench is at work; the method is already

@@ -1,0 +1,12 @@
+import type { Metadata } from 'next'
+import { lightFrom } from '@/lib/lamp/levels'
+import { Home } from '../(home)/home'
+
+type Props = { searchParams: Promise<Record<string, string | string[] | undefined>> }
+
+export const metadata: Metadata = { alternates: { canonical: '/' } }
+
+/** The home page in a light its address asks for: what the lamp shows without JavaScript. */
+export default async function LitHomePage({ searchParams }: Props) {
+  return <Home openingLux={lightFrom(await searchParams)} />
+}

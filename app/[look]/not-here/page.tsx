@@ -1,0 +1,8 @@
+import { notFound } from 'next/navigation'
+
+export const dynamic = 'force-static'
+
+/** Every address without a page is answered from here, so that one stored answer serves them all. */
+export default function NotHere() {
+  notFound()
+}

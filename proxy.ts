@@ -1,0 +1,29 @@
+import { type NextRequest, NextResponse } from 'next/server'
+import { contentSecurityPolicy } from '@/lib/page-policy.mjs'
+
+/**
+ * Gives the pages that are made for each request a policy with a nonce of its own; Next reads it from the request and
+ * puts the nonce on its scripts. Pages from the cache carry hashes instead (lib/page-cache.mjs). No page relies on this
+ * for who may see it.
+ */
+export function proxy(request: NextRequest): NextResponse {
+  const nonce = btoa(String.fromCharCode(...crypto.getRandomValues(new Uint8Array(16))))
+  const policy = contentSecurityPolicy([`'nonce-${nonce}'`])
+  const headers = new Headers(request.headers)
+  headers.set('content-security-policy', policy)
+  const response = NextResponse.next({ request: { headers } })
+  response.headers.set('content-security-policy', policy)
+  return response
+}
+
+export const config = {
+  matcher: [
+    '/quiz/:path*',
+    '/compare',
+    '/light',
+    { source: '/', has: [{ type: 'query', key: 'lux' }] },
+    { source: '/', has: [{ type: 'query', key: 'step' }] },
+    { source: '/devices', has: [{ type: 'query', key: 'sort' }] },
+    { source: '/devices', has: [{ type: 'query', key: 'order' }] },
+  ],
+}
