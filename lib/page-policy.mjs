@@ -25,6 +25,9 @@ export function contentSecurityPolicy(scripts = []) {
   return [`script-src ${["'self'", ...scripts].join(' ')}`, ...REST].join('; ')
 }
 
+/** A data block, such as structured data, is never executed and needs no permission (HTML standard, 4.12.1). */
+const isData = (attributes) => /\stype="(?!module"|text\/javascript")/.test(attributes)
+
 /**
  * The hash sources of every inline script in a page, each once: the SHA-256 of the bytes between the tags.
  * @param {string} html a page as the renderer wrote it, which escapes `</script` inside scripts
@@ -32,7 +35,7 @@ export function contentSecurityPolicy(scripts = []) {
 export function inlineScriptHashes(html) {
   const hashes = new Set()
   for (const [, attributes = '', body = ''] of html.matchAll(/<script\b([^>]*)>([\s\S]*?)<\/script>/g)) {
-    if (/\ssrc=/.test(attributes) || body === '') continue
+    if (/\ssrc=/.test(attributes) || isData(attributes) || body === '') continue
     hashes.add(`'sha256-${createHash('sha256').update(body).digest('base64')}'`)
   }
   return [...hashes]

@@ -1,7 +1,7 @@
 import Link from 'next/link'
 import type { Look } from '@/lib/look'
 import { LookChoice } from './look-choice'
-import { ROOMS } from './rooms'
+import { ALL_ROOMS } from './rooms'
 
 const CAUTIONS = [
   'Not medical advice. Sudden changes in sight, pain or haloes belong to an eye-care professional.',
@@ -15,7 +15,7 @@ const CAUTIONS = [
 export function Footer({ look }: { look: Look }) {
   return (
     <footer className="mt-16 border-t border-rule bg-sheet py-10">
-      <div className="measure grid gap-10 md:grid-cols-[1.6fr_0.7fr_1.2fr]">
+      <div className="measure grid gap-10 md:grid-cols-2 lg:grid-cols-[1.5fr_1fr_1.1fr]">
         <section aria-labelledby="cautions">
           <h2 id="cautions" className="font-text text-body font-semibold">
             Cautions
@@ -26,26 +26,31 @@ export function Footer({ look }: { look: Look }) {
             ))}
           </ul>
         </section>
-        <nav aria-label="Foot of the page">
-          <ul className="grid text-small">
-            {ROOMS.map((room) => (
-              <li key={room.href}>
-                <Link prefetch={false} href={room.href} className="inline-flex min-h-9 items-center">
-                  {room.name}
-                </Link>
-              </li>
-            ))}
-            <li>
-              <a href="/api/v1/editions/latest" className="inline-flex min-h-9 items-center">
-                Latest edition as data
-              </a>
-            </li>
-          </ul>
+        <nav aria-label="Foot of the page" className="grid grid-cols-2 gap-x-6">
+          {ALL_ROOMS.map(({ name, rooms }) => (
+            <section key={name}>
+              <h2 className="font-text text-body font-semibold">{name}</h2>
+              <ul className="mt-1 grid text-small">
+                {rooms.map((room) => (
+                  <li key={room.href}>
+                    <Link prefetch={false} href={room.href} className="inline-flex min-h-9 items-center">
+                      {room.name}
+                    </Link>
+                  </li>
+                ))}
+              </ul>
+            </section>
+          ))}
+          <p className="col-span-2 mt-1 text-small">
+            <a href="/feed.xml" className="inline-flex min-h-9 items-center">
+              News as a feed
+            </a>
+          </p>
         </nav>
         <LookChoice look={look} />
       </div>
       <p className="measure mt-10 text-note text-soft">
-        All devices, makers and figures here are invented for demonstration.
+        All devices, makers, people and figures here are invented for demonstration.
       </p>
     </footer>
   )

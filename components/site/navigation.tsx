@@ -12,7 +12,7 @@ import { isIn, ROOMS } from './rooms'
 export function WideNavigation() {
   const pathname = publicPath(usePathname())
   return (
-    <nav aria-label="Main" className="hidden gap-6 self-stretch text-small sm:flex">
+    <nav aria-label="Main" className="hidden gap-6 self-stretch text-small md:flex">
       {ROOMS.map((room) => (
         <Link
           prefetch={false}
@@ -32,7 +32,7 @@ export function WideNavigation() {
 export function PhoneNavigation() {
   const pathname = publicPath(usePathname())
   return (
-    <details key={pathname} className="group/menu ml-auto sm:hidden">
+    <details key={pathname} className="group/menu ml-auto md:hidden">
       <summary className="flex min-h-11 cursor-pointer list-none items-center rounded-card border border-edge px-4 font-semibold group-open/menu:bg-tint [&::-webkit-details-marker]:hidden">
         Menu
       </summary>

@@ -1,7 +1,9 @@
 import 'server-only'
 import { connect, type Db } from '@/db/client'
+import { noteOutage } from '@/lib/serving/outage.mjs'
 import { config } from './config'
 import { withDeadline } from './deadline'
+import { isOutage } from './outage'
 
 const globals = globalThis as { lampleafDatabase?: ReturnType<typeof connect> }
 
@@ -20,6 +22,12 @@ const READ_DEADLINE_MS = 5000
  * so every read has a deadline.
  * @throws DeadlineExceeded after five seconds; the driver's own error before that
  */
-export function read<T>(query: (db: Db) => Promise<T>): Promise<T> {
-  return withDeadline(query(connection()), READ_DEADLINE_MS, 'The database did not answer')
+export async function read<T>(query: (db: Db) => Promise<T>): Promise<T> {
+  try {
+    return await withDeadline(query(connection()), READ_DEADLINE_MS, 'The database did not answer')
+  } catch (error) {
+    // The process around the site answers 503 then; a page cannot.
+    if (isOutage(error)) noteOutage()
+    throw error
+  }
 }

@@ -62,8 +62,15 @@ export async function startSite({ distDir, port, env, log, onExit }) {
     log?.(text)
   }
   let ended = null
-  keepRunning(process.execPath, [NEXT, 'start', '-H', '127.0.0.1', '-p', String(port)], {
-    env: { NODE_ENV: 'production', NEXT_TELEMETRY_DISABLED: '1', NEXT_DIST_DIR: distDir, PORT: String(port), ...env },
+  keepRunning(process.execPath, ['scripts/serve.mjs'], {
+    env: {
+      NODE_ENV: 'production',
+      NEXT_TELEMETRY_DISABLED: '1',
+      NEXT_DIST_DIR: distDir,
+      HOST: '127.0.0.1',
+      PORT: String(port),
+      ...env,
+    },
     log: keep,
     onExit: (code) => {
       ended = code

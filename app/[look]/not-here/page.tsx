@@ -1,4 +1,7 @@
+import type { Metadata } from 'next'
 import { notFound } from 'next/navigation'
+
+export const metadata: Metadata = { title: 'Not found' }
 
 export const dynamic = 'force-static'
 

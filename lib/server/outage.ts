@@ -1,4 +1,4 @@
-import { DeadlineExceeded } from '@/lib/server/deadline'
+import { DeadlineExceeded } from './deadline'
 
 // What Node and the driver say when the server cannot be reached or the connection broke.
 const CONNECTION =

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import { isOutage } from '@/app/api/outage'
+import { isOutage } from '@/lib/server/outage'
 import { DeadlineExceeded } from '@/lib/server/deadline'
 
 const coded = (code: string) => Object.assign(new Error('words'), { code })

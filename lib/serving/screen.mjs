@@ -1,0 +1,44 @@
+/** What our web process answers to; anything else is turned away before it reaches a page. */
+const METHODS = new Set(['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS'])
+
+/** Headers that only our own layers may set: a request that brings them is trying something. */
+const INTERNAL =
+  /^(x-middleware-|x-invoke-|x-nextjs-|x-matched-path$|x-now-route-|x-prerender-|content-security-policy)/
+
+/**
+ * Refuses what no page or handler of ours could make sense of, and takes away headers no visitor may send.
+ * @param {import('node:http').IncomingMessage} request
+ * @param {import('node:http').ServerResponse} response
+ * @returns {boolean} whether the request was answered here
+ */
+export function screen(request, response) {
+  if (!METHODS.has(request.method ?? '')) {
+    response.setHeader('Allow', [...METHODS].join(', '))
+    refuse(response, 405, 'This method is not answered here.')
+    return true
+  }
+  if (!isReadable(request.url ?? '')) {
+    refuse(
+      response,
+      400,
+      'This address cannot be read: a percent sign in it is not followed by two hexadecimal digits.',
+    )
+    return true
+  }
+  for (const name of Object.keys(request.headers)) if (INTERNAL.test(name)) delete request.headers[name]
+  return false
+}
+
+function isReadable(url) {
+  try {
+    decodeURIComponent(url.split('?')[0])
+    return url.startsWith('/')
+  } catch {
+    return false
+  }
+}
+
+function refuse(response, status, message) {
+  response.writeHead(status, { 'Content-Type': 'text/plain; charset=utf-8', 'Cache-Control': 'no-store' })
+  response.end(`${message}\n`)
+}
