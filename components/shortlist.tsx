@@ -4,6 +4,7 @@ import { LazyMotion, MotionConfig } from 'framer-motion'
 import * as m from 'framer-motion/m'
 import { useEffect, useState } from 'react'
 import { formatNumber } from '@/lib/format/number'
+import { motionWhenUsed } from './motion-when-used'
 
 export type ShortlistRow = {
   slug: string
@@ -15,8 +16,6 @@ export type ShortlistRow = {
   /** Too close to call with the first. */
   tied: boolean
 }
-
-const loadLayout = () => import('./shortlist-motion').then((module) => module.default)
 
 /**
  * The order of the devices so far, on a dark band. Rows glide to their new place in 200 ms when answers change; they
@@ -37,7 +36,7 @@ export function Shortlist({
   const level = shown.filter((row) => row.tied).length
   return (
     <div>
-      <LazyMotion features={loadLayout} strict>
+      <LazyMotion features={motionWhenUsed} strict>
         <MotionConfig reducedMotion="user" transition={{ duration: moves / 1000, ease: 'easeOut' }}>
           <ol className="grid gap-3.5">
             {shown.map((row, i) => (

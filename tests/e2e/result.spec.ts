@@ -111,11 +111,17 @@ test('where the browser will not copy, the address is shown to be copied by hand
   await expect(page.getByRole('textbox', { name: 'Address of this result' })).toHaveValue(page.url())
 })
 
-test('the result prints on one page of A4', async ({ page }) => {
+test('the result prints on one page of A4 or Letter, with its address, edition and date', async ({ page }) => {
   for (const query of ['&page=all', '&budget=250&min-size=6&colour=must-not&bed-dark=1&bed-dark.light=off']) {
     await page.goto(`${RESULT}${query}`)
-    const pdf = await page.pdf({ format: 'A4', preferCSSPageSize: true })
-    expect(pdf.toString('latin1').match(/\/Type\s*\/Page\b(?!s)/g), query).toHaveLength(1)
+    for (const format of ['A4', 'Letter']) {
+      const pdf = await page.pdf({ format, preferCSSPageSize: true })
+      expect(pdf.toString('latin1').match(/\/Type\s*\/Page\b(?!s)/g), `${format} ${query}`).toHaveLength(1)
+    }
+    await page.emulateMedia({ media: 'print' })
+    await expect(page.getByText(/^https?:\/\/\S+\/quiz\/result\?/)).toBeVisible()
+    await expect(page.getByText(/Edition 3, released \d{1,2} \w+ \d{4}/)).toBeVisible()
+    await page.emulateMedia({ media: null })
   }
 })
 
