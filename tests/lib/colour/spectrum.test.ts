@@ -60,7 +60,8 @@ describe.each(reference.spectra)('$id, $name', ({ R, D65_10deg, otherLights }) =
   )
 })
 
-describe.each(Object.entries(WEIGHTS))('the weights of %s', (name, weights) => {
+// D50 is not among that file's weights; lights.test.ts holds it to the tables they were worked out from.
+describe.each(Object.entries(WEIGHTS).filter(([name]) => name !== 'D50'))('the weights of %s', (name, weights) => {
   test('are those of 360–780 nm with the ends folded in', () => {
     const table = cie.weights.tables[`${name}/10deg/10nm` as keyof typeof cie.weights.tables]
     const fold = (full: number[]) =>
@@ -80,7 +81,7 @@ describe.each(Object.entries(WEIGHTS))('the weights of %s', (name, weights) => {
   })
 
   test('sum to the white of the light, Y 100', () => {
-    const white = reference.whites[name as Light]
+    const white = reference.whites[name as keyof typeof reference.whites]
     expectXyz(weights.white, white, 5)
   })
 })
