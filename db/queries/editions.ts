@@ -1,4 +1,4 @@
-import { desc, eq, max } from 'drizzle-orm'
+import { count, desc, eq, max, sql } from 'drizzle-orm'
 import type { Edition } from '@/lib/method/types'
 import type { Db } from '../client'
 import { editions } from '../schema'
@@ -39,4 +39,36 @@ export function listEditions(db: Db) {
 export async function findComponents(db: Db, number: number) {
   const [row] = await db.select({ components: editions.components }).from(editions).where(eq(editions.number, number))
   return row?.components ?? null
+}
+
+/** How many editions have been released. */
+export async function countEditions(db: Db): Promise<number> {
+  const [row] = await db.select({ all: count() }).from(editions)
+  return row?.all ?? 0
+}
+
+/** Some released editions, newest first, with the number of their devices and without their documents. */
+export function listEditionSummaries(db: Db, { limit, offset = 0 }: { limit: number; offset?: number }) {
+  return db
+    .select({
+      number: editions.number,
+      publishedAt: editions.publishedAt,
+      sha256: editions.sha256,
+      title: editions.title,
+      note: editions.note,
+      devices: sql<number>`jsonb_array_length(${editions.document} -> 'devices')`,
+    })
+    .from(editions)
+    .orderBy(desc(editions.number))
+    .limit(limit)
+    .offset(offset)
+}
+
+/** What the team wrote at the release of an edition; null where there is none. */
+export async function findEditionWords(db: Db, number: number): Promise<{ title: string; note: string } | null> {
+  const [row] = await db
+    .select({ title: editions.title, note: editions.note })
+    .from(editions)
+    .where(eq(editions.number, number))
+  return row ?? null
 }

@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest'
-import { isOutage } from '@/lib/server/outage'
 import { DeadlineExceeded } from '@/lib/server/deadline'
+import { isOutage } from '@/lib/server/outage'
 
 const coded = (code: string) => Object.assign(new Error('words'), { code })
 
