@@ -1,3 +1,4 @@
+import { type LookParams, requireLook } from '@/lib/server/look'
 import { Catalogue, catalogueMetadata } from './catalogue'
 
 export const dynamic = 'force-static'
@@ -5,6 +6,6 @@ export const revalidate = 60
 
 export const metadata = catalogueMetadata
 
-export default function DevicesPage() {
-  return <Catalogue search={{}} />
+export default async function DevicesPage({ params }: { params: Promise<LookParams> }) {
+  return <Catalogue look={await requireLook(params)} pairs={[]} />
 }

@@ -1,7 +1,8 @@
 import { describe, expect, test } from 'vitest'
-import { type DeviceRow, parseSort, SORTS, sortHref, sortRows } from '@/app/[look]/devices/sort'
+import { catalogueHref, readCatalogue } from '@/lib/catalogue/address'
+import { type DeviceRow, nextSort, SORTS, type Sort, type SortKey, sortFor, sortRows } from '@/lib/catalogue/sort'
 import { publishedFigures } from '@/lib/findings/published'
-import { makeDevice, makeEdition } from '../fixtures/edition'
+import { makeDevice, makeEdition } from '../../fixtures/edition'
 
 const u = { L: 0.4, a: 0.1, b: 0.1 }
 const devices = [
@@ -13,6 +14,7 @@ const devices = [
   }),
   makeDevice({
     slug: 'birch',
+    weight: null,
     name: 'Birch',
     page: { L: 74, a: -2, b: 3, u },
     price: null,
@@ -21,6 +23,7 @@ const devices = [
   }),
   makeDevice({
     slug: 'cedar',
+    weight: 120,
     name: 'Cedar',
     page: { L: 66, a: 0, b: 0.5, u },
     price: { amount: 9_900, currency: 'GBP' },
@@ -36,7 +39,8 @@ const devices = [
 ]
 const edition = makeEdition(devices)
 const rows: DeviceRow[] = devices.map((device) => ({ device, figures: publishedFigures(edition, device) }))
-const slugs = (address: Record<string, string>) => sortRows(rows, parseSort(address)).map(({ device }) => device.slug)
+const sortOf = (address: Record<string, string>): Sort => sortFor(readCatalogue(Object.entries(address)).query)
+const slugs = (address: Record<string, string>) => sortRows(rows, sortOf(address)).map(({ device }) => device.slug)
 
 describe('the list of devices is ordered', () => {
   test.each([
@@ -55,6 +59,11 @@ describe('the list of devices is ordered', () => {
       { sort: 'price', order: 'descending' },
       ['amber', 'cedar', 'birch', 'dogwood'],
     ],
+    [
+      'by weight, the lightest first and what is not stated last',
+      { sort: 'weight' },
+      ['cedar', 'amber', 'dogwood', 'birch'],
+    ],
     ['by front light, none before not stated', { sort: 'front-light' }, ['amber', 'cedar', 'birch', 'dogwood']],
     ['by chroma, the least first', { sort: 'chroma' }, ['cedar', 'amber', 'birch', 'dogwood']],
   ])('%s', (_, address, order) => {
@@ -63,15 +72,16 @@ describe('the list of devices is ordered', () => {
 })
 
 test('every order leads to itself the other way round, and keeps every device', () => {
-  for (const by of Object.keys(SORTS)) {
-    const sort = parseSort({ sort: by })
-    const other = parseSort(Object.fromEntries(new URL(sortHref(sort, sort.by), 'http://bench.example').searchParams))
+  for (const by of Object.keys(SORTS) as SortKey[]) {
+    const sort = sortFor({ sort: by })
+    const href = catalogueHref({ sort: by, order: nextSort(sort, by).order })
+    const other = sortOf(Object.fromEntries(new URL(href, 'http://bench.example').searchParams))
     expect(other.by).toBe(by)
     expect(other.order).not.toBe(sort.order)
     expect(sortRows(rows, other)).toHaveLength(rows.length)
   }
 })
 
-test('an order given twice in the address is no order we know', () => {
-  expect(parseSort({ sort: ['price', 'name'] })).toEqual({ by: 'lightness', order: 'descending' })
+test('the list is never ordered by whiteness unless one asks for it', () => {
+  expect(sortFor({}).by).toBe('lightness')
 })
