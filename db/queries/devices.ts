@@ -1,8 +1,11 @@
-import { asc, desc, eq, inArray } from 'drizzle-orm'
+import { asc, desc, eq, inArray, sql } from 'drizzle-orm'
+import type { Edition } from '@/lib/method/types'
 import type { Db } from '../client'
 import {
   corrections,
   devices,
+  editionEntries,
+  editions,
   frontLightMeasurements,
   instruments,
   makers,
@@ -55,6 +58,31 @@ export async function findDeviceBySlug(db: Db, slug: string) {
   }
 }
 
+export type DeviceEntry = Awaited<ReturnType<typeof listDeviceEntries>>[number]
+
+/**
+ * What each released edition froze of the device at this address, newest edition first: its figures, the sets they
+ * rest on, and what that edition's doubts are worked out from. Empty: no edition has it.
+ */
+export function listDeviceEntries(db: Db, slug: string) {
+  return db
+    .select({
+      edition: editionEntries.edition,
+      publishedAt: editions.publishedAt,
+      revisionId: editionEntries.revisionId,
+      revision: revisions.name,
+      device: editionEntries.device,
+      setIds: editionEntries.setIds,
+      uncertainty: sql<Edition['uncertainty']>`${editions.document} -> 'uncertainty'`,
+      control: sql<Edition['control']>`${editions.document} -> 'control'`,
+    })
+    .from(editionEntries)
+    .innerJoin(editions, eq(editions.number, editionEntries.edition))
+    .innerJoin(revisions, eq(revisions.id, editionEntries.revisionId))
+    .where(eq(editionEntries.slug, slug))
+    .orderBy(desc(editionEntries.edition))
+}
+
 function listFrontLights(db: Db, unitIds: number[]) {
   return db
     .select()
@@ -101,6 +129,7 @@ async function listSets(db: Db, unitIds: number[]) {
       temperatureCelsius: sessions.temperatureCelsius,
       geometry: sessions.geometry,
       apertureMm: sessions.apertureMm,
+      instrumentId: instruments.id,
       instrument: instruments.name,
     })
     .from(sets)

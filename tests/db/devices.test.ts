@@ -1,5 +1,8 @@
 import { afterAll, beforeAll, expect, test } from 'vitest'
-import { type DeviceRecord, findDeviceBySlug } from '@/db/queries/devices'
+import { type DeviceRecord, findDeviceBySlug, listDeviceEntries } from '@/db/queries/devices'
+import { findEdition } from '@/db/queries/editions'
+import { listTileReadings, listWhiteCalibrations } from '@/db/queries/session-state'
+import { controlStates } from '@/lib/findings/control-state'
 import { createSeededDatabase } from '@/tests/fixtures/db'
 
 let seeded: Awaited<ReturnType<typeof createSeededDatabase>>
@@ -60,4 +63,48 @@ test('a correction comes with its public replies, oldest first', async () => {
   expect(days).toHaveLength(2)
   expect(days).toEqual([...days].sort())
   expect((await recordOf('ostler-plain-7')).corrections).toEqual([])
+})
+
+test('every edition’s entry of a device comes with its revision, its sets and the doubts of that edition', async () => {
+  const entries = await listDeviceEntries(seeded.db, 'ostler-plain-6')
+  expect(entries.map(({ edition, revision }) => [edition, revision])).toEqual([
+    [3, 'B'],
+    [2, 'B'],
+    [1, 'A'],
+  ])
+  for (const entry of entries) {
+    const edition = (await findEdition(seeded.db, entry.edition))!
+    expect(entry.device).toEqual(edition.devices.find(({ slug }) => slug === 'ostler-plain-6'))
+    expect(entry.uncertainty).toEqual(edition.uncertainty)
+    expect(entry.control).toEqual(edition.control)
+    expect(entry.publishedAt).toEqual(new Date(edition.publishedAt))
+  }
+  const { sets, units } = await recordOf('ostler-plain-6')
+  const ofRevision = new Set(units.filter((unit) => unit.revisionId === entries[0]!.revisionId).map((unit) => unit.id))
+  const counted = sets.filter((set) => entries[0]!.setIds.includes(set.id))
+  expect(counted).toHaveLength(entries[0]!.setIds.length)
+  expect(counted.every((set) => ofRevision.has(set.unitId))).toBe(true)
+})
+
+test('a device no edition has, has no entries', async () => {
+  expect(await listDeviceEntries(seeded.db, 'no-such-device')).toEqual([])
+})
+
+test('the tile was read at the start and the end of every session a device was read in, after its white was set', async () => {
+  const [tiles, calibrations] = [await listTileReadings(seeded.db), await listWhiteCalibrations(seeded.db)]
+  const starts = tiles.map(({ startedAt }) => startedAt.getTime())
+  expect(starts).toEqual([...starts].sort((one, other) => one - other))
+  const states = new Map(controlStates(tiles).map((state) => [state.session, state]))
+  const { sets } = await recordOf('tamber-reed-7')
+  for (const { session, startedAt, instrumentId } of sets) {
+    const own = tiles.filter((reading) => reading.session === session)
+    expect(new Set(own.map(({ moment }) => moment))).toEqual(new Set(['start', 'end']))
+    expect(own.every((reading) => reading.instrumentId === instrumentId)).toBe(true)
+    const state = states.get(session)!
+    expect(state.readings).toBe(own.length)
+    expect(state.reach!.L).toBeGreaterThan(0)
+    const white = calibrations.findLast((one) => one.instrumentId === instrumentId && one.at <= startedAt)
+    expect(white?.tileSerial).toMatch(/TILE/)
+    expect(startedAt.getTime() - white!.at.getTime()).toBeLessThan(60 * 60_000)
+  }
 })

@@ -2,7 +2,7 @@ import Link from 'next/link'
 import type { ReactNode } from 'react'
 import type { Figure, PublishedFigures } from '@/lib/findings/published'
 import type { Standing } from '@/lib/findings/standing'
-import { formatDoubt, formatNumber, formatOrdinal, formatRange } from '@/lib/format/number'
+import { formatDoubt, formatNumber, formatOrdinal } from '@/lib/format/number'
 import { Dagger, DECIMALS } from '../figure'
 
 /** The four figures a reader comes for, each with its doubt and a plain word on what it means. */
@@ -10,7 +10,7 @@ export function BigFigures({ figures, standing }: { figures: PublishedFigures; s
   const outside = !figures.withinLimits
   return (
     <section aria-label="Figures of the page" className="border-y border-rule border-t-2 border-t-ink py-5">
-      <dl className="grid grid-cols-2 gap-x-6 gap-y-6 md:grid-cols-4">
+      <dl className="device-figures grid grid-cols-2 gap-x-6 gap-y-6 md:grid-cols-4">
         <Big id="lightness" name="Lightness L*" figure={figures.lightness} decimals={DECIMALS.lightness}>
           {inOrder(standing)}
         </Big>
@@ -69,7 +69,7 @@ function Big({
   return (
     <div>
       <dt className="text-note text-soft">
-        <Link href={`/method#q-${id}`} className="text-soft">
+        <Link href={`/method#q-${id}`} prefetch={false} className="text-soft">
           {name}
         </Link>
       </dt>
@@ -87,9 +87,14 @@ function Big({
   )
 }
 
-/** "3rd of 16, rank 2–5": the place by lightness and the band the doubt allows. */
-function inOrder({ place, best, worst, of }: Standing): string {
-  return `${formatOrdinal(place)} of ${formatNumber(of)}, rank ${formatRange(best, worst)}`
+/**
+ * The place by lightness as a band, since that is all the doubt allows: "3rd to 6th of 16". A single place is said only
+ * where the pages before and after differ by more than the doubt.
+ */
+export function inOrder({ best, worst, of }: Standing): string {
+  if (of === 1) return 'the only one measured'
+  if (best === worst) return `${formatOrdinal(best)} of ${formatNumber(of)} by lightness, clear of the others`
+  return `${formatOrdinal(best)} to ${formatOrdinal(worst)} of ${formatNumber(of)} by lightness, too close to call`
 }
 
 /** CIE 15: positive tint is greenish, negative reddish; within its doubt it has no clear side. */

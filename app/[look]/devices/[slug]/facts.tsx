@@ -1,32 +1,42 @@
 import type { ReactNode } from 'react'
 import { type Column, Table } from '@/components/ui/table'
-import type { DeviceRecord } from '@/db/queries/devices'
+import type { DeviceEntry, DeviceRecord } from '@/db/queries/devices'
 import { formatDay } from '@/lib/format/date'
 import { formatList } from '@/lib/format/list'
+import { formatDiagonal, formatMass } from '@/lib/format/measures'
 import { formatMoney } from '@/lib/format/money'
 import { formatExact, formatNumber, formatUnit } from '@/lib/format/number'
-import type { EditionDevice } from '@/lib/method/types'
+import type { Units as LengthUnits } from '@/lib/look'
 import { NotStated } from '../figure'
 import { newestSpecs, unitsOf } from './dossier'
 
 /** What is stated of the device, by whom and when; its prices, its units, and its front light as measured. */
-export function Facts({ record, device }: { record: DeviceRecord; device: EditionDevice }) {
-  const specs = newestSpecs(record, device)
-  const units = unitsOf(record, device)
+export function Facts({
+  record,
+  entry,
+  lengths,
+}: {
+  record: DeviceRecord
+  entry: DeviceEntry
+  /** Whether sizes and weights are told in millimetres and grams, or in inches and ounces. */
+  lengths: LengthUnits
+}) {
+  const specs = newestSpecs(record, entry)
+  const units = unitsOf(record, entry)
   const unitIds = new Set(units.map(({ id }) => id))
   const frontLights = record.frontLights.filter(({ unitId }) => unitIds.has(unitId))
   return (
-    <section aria-labelledby="facts" className="mt-14">
+    <section aria-labelledby="facts" className="mt-14 print:hidden">
       <h2 id="facts">What is stated</h2>
       <div className="mt-5 grid gap-10">
         <Table
           caption="Facts, each with who stated it and when. What nobody states is not taken as “no”."
-          columns={specColumns}
+          columns={specColumns(lengths)}
           rows={FIELDS.map((field) => ({ field, spec: specs.find((spec) => spec.field === field) ?? null }))}
           rowKey={({ field }) => field}
         />
         <Table
-          caption="Prices as seen, newest first"
+          caption="Prices as seen, newest first, in the currency they were seen in"
           columns={priceColumns}
           rows={record.prices}
           rowKey={({ id }) => String(id)}
@@ -41,14 +51,6 @@ export function Facts({ record, device }: { record: DeviceRecord; device: Editio
             rowKey={({ id }) => String(id)}
           />
         )}
-        {record.revisions.length > 1 && (
-          <Table
-            caption="Revisions: what the maker changed under this name"
-            columns={revisionColumns(device.revision)}
-            rows={record.revisions}
-            rowKey={({ id }) => String(id)}
-          />
-        )}
       </div>
     </section>
   )
@@ -56,7 +58,7 @@ export function Facts({ record, device }: { record: DeviceRecord; device: Editio
 
 type Spec = DeviceRecord['specs'][number]
 type SpecField = Spec['field']
-const NAMES: Record<SpecField, string> = {
+export const FACT_NAMES: Record<SpecField, string> = {
   diagonal: 'Size of the page',
   ppi: 'Resolution',
   weight: 'Weight',
@@ -70,24 +72,31 @@ const NAMES: Record<SpecField, string> = {
   speech: 'Reading aloud',
   formats: 'File formats',
 }
-const FIELDS = Object.keys(NAMES) as SpecField[]
+const FIELDS = Object.keys(FACT_NAMES) as SpecField[]
 
-const specColumns: Column<{ field: SpecField; spec: Spec | null }>[] = [
-  { key: 'field', head: 'Fact', label: 'Fact', heading: true, cell: ({ field }) => NAMES[field] },
-  { key: 'value', head: 'Stated', label: 'Stated', cell: ({ spec }) => stated(spec) },
-  { key: 'source', head: 'By', label: 'By', cell: ({ spec }) => spec?.source ?? '' },
-  { key: 'date', head: 'On', label: 'On', cell: ({ spec }) => (spec ? formatDay(spec.statedOn) : '') },
+const specColumns = (lengths: LengthUnits): Column<{ field: SpecField; spec: Spec | null }>[] => [
+  { key: 'field', head: 'Fact', label: 'Fact', heading: true, cell: ({ field }) => FACT_NAMES[field] },
+  { key: 'value', head: 'Stated', label: 'Stated', cell: ({ spec }) => stated(spec, lengths) },
+  { key: 'source', head: 'By', label: 'By', cell: ({ spec }) => spec?.source ?? <NotStated /> },
+  { key: 'date', head: 'On', label: 'On', cell: ({ spec }) => (spec ? formatDay(spec.statedOn) : <NotStated />) },
 ]
 
 /** A fact in words: its number with its unit, its list, or yes and no. */
-function stated(spec: Spec | null): ReactNode {
+export function stated(spec: Spec | null | undefined, lengths: LengthUnits): ReactNode {
   if (!spec || spec.stated === 'not-stated') return <NotStated />
   if (spec.stated === 'no') return 'no'
   if (spec.list) return formatList(spec.list)
   if (spec.value === null) return 'yes'
-  if (spec.field === 'water') return spec.value === 0 ? 'none' : `second digit ${formatExact(spec.value)} (IEC 60529)`
-  const unit = { diagonal: 'in', ppi: 'ppi', weight: 'g' }[spec.field as 'diagonal' | 'ppi' | 'weight']
-  return formatUnit(spec.value, unit, Number.isInteger(spec.value) ? 0 : 1)
+  switch (spec.field) {
+    case 'water':
+      return spec.value === 0 ? 'none' : `second digit ${formatExact(spec.value)} (IEC 60529)`
+    case 'diagonal':
+      return formatDiagonal(spec.value, lengths)
+    case 'weight':
+      return formatMass(spec.value, lengths)
+    default:
+      return formatUnit(spec.value, 'ppi')
+  }
 }
 
 type Price = DeviceRecord['prices'][number]
@@ -158,17 +167,4 @@ const frontLightColumns = (units: readonly Unit[]): Column<FrontLight>[] => [
         ? formatNumber(coolestKelvin)
         : `${formatNumber(warmestKelvin)} to ${formatNumber(coolestKelvin)}`,
   },
-]
-
-type Revision = DeviceRecord['revisions'][number]
-const revisionColumns = (measured: string): Column<Revision>[] => [
-  {
-    key: 'name',
-    head: 'Revision',
-    label: 'Revision',
-    heading: true,
-    cell: ({ name }) => (name === measured ? `${name} (the one these figures are of)` : name),
-  },
-  { key: 'since', head: 'Since', label: 'Since', cell: ({ since }) => (since ? formatDay(since) : <NotStated />) },
-  { key: 'note', head: 'What changed', label: 'What changed', cell: ({ note }) => note ?? '' },
 ]

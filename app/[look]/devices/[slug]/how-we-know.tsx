@@ -1,31 +1,23 @@
 import Link from 'next/link'
 import type { ReactNode } from 'react'
-import type { DeviceRecord } from '@/db/queries/devices'
+import type { DeviceEntry, DeviceRecord } from '@/db/queries/devices'
 import { evidenceOf } from '@/lib/findings/evidence'
 import { formatDay } from '@/lib/format/date'
 import { formatList } from '@/lib/format/list'
 import { formatNumber, formatUnit } from '@/lib/format/number'
-import type { Edition, EditionDevice } from '@/lib/method/types'
+import type { Edition } from '@/lib/method/types'
 import { countedSets, unitsOf } from './dossier'
 
 /** What the figures rest on: how many readings, where, when, with what, and whose units. */
-export function HowWeKnow({
-  record,
-  device,
-  edition,
-}: {
-  record: DeviceRecord
-  device: EditionDevice
-  edition: Edition
-}) {
-  const sets = countedSets(record, device)
+export function HowWeKnow({ record, entry, edition }: { record: DeviceRecord; entry: DeviceEntry; edition: Edition }) {
+  const sets = countedSets(record, entry)
   const evidence = evidenceOf(sets)
-  const units = unitsOf(record, device)
+  const units = unitsOf(record, entry)
   const instruments = [...new Set(sets.map(({ source }) => source.instrument))]
   const apertures = [...new Set(sets.map(({ source }) => source.apertureMm))].sort((one, other) => one - other)
   if (!evidence) return null
   return (
-    <section aria-labelledby="how">
+    <section aria-labelledby="how" className="print:hidden">
       <h2 id="how" className="text-h3">
         How we know
       </h2>
@@ -48,12 +40,24 @@ export function HowWeKnow({
         <Row name="Between units">{spread(evidence.betweenUnits, 'one unit only')}</Row>
         <Row name="Between sessions">{spread(edition.uncertainty.session.L, '')}, on the control tile</Row>
         <Row name="Bought or lent">{obtained(units)}</Row>
-        <Row name="Revision">{device.revision}</Row>
+        <Row name="Revision">{entry.revision}</Row>
       </dl>
-      <p className="mt-4 grid gap-1">
-        <a href="#readings">All readings</a>
-        <Link href="/method#figures">How readings become figures</Link>
-      </p>
+      <ul className="mt-4 grid">
+        <li>
+          <Link
+            href={`/devices/${record.slug}/readings`}
+            prefetch={false}
+            className="inline-flex min-h-11 items-center md:min-h-8"
+          >
+            Every reading
+          </Link>
+        </li>
+        <li>
+          <Link href="/method#figures" prefetch={false} className="inline-flex min-h-11 items-center md:min-h-8">
+            How readings become figures
+          </Link>
+        </li>
+      </ul>
     </section>
   )
 }

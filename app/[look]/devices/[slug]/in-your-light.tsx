@@ -23,7 +23,7 @@ export function InYourLight({
 }) {
   const { timesTheLight, fromPaper, yPage, yInk } = figures
   return (
-    <section aria-labelledby="light" className="mt-14 grid gap-x-12 gap-y-6 lg:grid-cols-[1fr_1.6fr]">
+    <section aria-labelledby="light" className="mt-14 print:hidden grid gap-x-12 gap-y-6 lg:grid-cols-[1fr_1.6fr]">
       <div>
         <h2 id="light">In your light</h2>
         <p className="mt-3">
@@ -37,7 +37,11 @@ export function InYourLight({
         <p className="mt-3 text-small text-soft">
           The chart shows how many times more contrast the page gives than the eye needs, with its front light off,
           beside the control paper printed in an ink of L* {formatNumber(PRINT_LIGHTNESS)} (house); normal text and
-          usual eyes. <Link href="/method#reserve">How it is worked out</Link>.
+          usual eyes.{' '}
+          <Link href="/method#reserve" prefetch={false}>
+            How it is worked out
+          </Link>
+          .
         </p>
         <p className="mt-3 text-small text-soft">{frontLightInWords(device)}</p>
       </div>
