@@ -28,7 +28,7 @@ const CLEAR = 15
 const BLACK = 0.02
 
 /** How dark a surface of this luminance, cd/m², looks in the picture: 0 as measured, 1 black. */
-function gloomAt(luminance: number): number {
+export function gloomAt(luminance: number): number {
   return luminance > 0 ? clamp(Math.log(CLEAR / luminance) / Math.log(CLEAR / BLACK)) : 1
 }
 

@@ -2,12 +2,12 @@
 
 import { AnimatePresence, m } from 'framer-motion'
 import type { CSSProperties } from 'react'
+import { Gloom } from '@/components/gloom'
 import { Sheet } from '@/components/sheet'
 import { labToHex } from '@/lib/colour/display'
 import { formatNumber } from '@/lib/format/number'
 import type { LampRow } from '@/lib/lamp/ranking'
 import type { Lab } from '@/lib/method/types'
-import styles from './lamp.module.css'
 
 /**
  * The best pages in this light, in order, standing in the booth with a strip of the control paper; names and fits
@@ -104,16 +104,5 @@ function Standing({
         <Gloom gloom={paperGloom} />
       </span>
     </div>
-  )
-}
-
-/** The dark that falls on a page: a picture of the light, never of the page's measured colour. */
-function Gloom({ gloom }: { gloom: number }) {
-  return (
-    <span
-      aria-hidden="true"
-      className={`${styles.gloom} absolute inset-0 transition-opacity duration-200 paper:hidden`}
-      style={{ opacity: 0.93 * gloom }}
-    />
   )
 }

@@ -2,19 +2,21 @@
 
 import { LazyMotion, MotionConfig } from 'framer-motion'
 import { useMemo } from 'react'
+import { Lamp } from '@/components/lamp'
+import { LightControl } from '@/components/light-control'
+import { motionWhenUsed } from '@/components/motion-when-used'
 import { Notice } from '@/components/ui/notice'
+import { useLight } from '@/components/use-light'
 import { formatLux, formatNumber } from '@/lib/format/number'
 import { nearestLevel } from '@/lib/lamp/levels'
 import { FRONT_LIGHT_BELOW_LUX } from '@/lib/lamp/question'
 import { gloomOfPaper, type LampDevice, rankUnderLamp } from '@/lib/lamp/ranking'
 import type { Lab } from '@/lib/method/types'
 import { BoothRow } from './booth-row'
-import { Lamp } from './lamp'
-import { LightControl } from './light-control'
-import { useLight } from './use-light'
 import { useStillness } from './use-stillness'
 
-const motionFeatures = () => import('framer-motion').then(({ domMax }) => domMax)
+/** The home page in one light. */
+const hrefFor = (lux: number) => `?lux=${lux}`
 
 /** How many pages stand in the booth. */
 const STANDING = 5
@@ -32,19 +34,19 @@ export function LampStage({
   paper: Lab
   openingLux: number
 }) {
-  const [lux, setLux] = useLight(openingLux)
+  const [lux, setLux] = useLight(openingLux, hrefFor)
   const still = useStillness()
   const rows = useMemo(() => rankUnderLamp(devices, lux), [devices, lux])
   const readable = rows.some((row) => row.readable)
 
   return (
-    <LazyMotion features={motionFeatures} strict>
+    <LazyMotion features={motionWhenUsed} strict>
       <MotionConfig reducedMotion="user" transition={{ duration: still ? 0 : 0.2 }}>
         <div className="relative grid min-w-0 content-end gap-5 sm:pt-60">
           <Lamp lux={lux} />
           <BoothRow rows={rows.slice(0, STANDING)} paper={paper} paperGloom={gloomOfPaper(paper, lux)} still={still} />
           <div className="relative grid gap-3">
-            <LightControl lux={lux} onChange={setLux}>
+            <LightControl action="/" lux={lux} hrefFor={hrefFor} onChange={setLux}>
               <p role="status" className="text-brass-lit">
                 {nearestLevel(lux).name}, about {formatLux(lux)} lux:{' '}
                 {readable

@@ -1,22 +1,31 @@
 'use client'
 
 import { type FormEvent, type ReactNode, useState } from 'react'
-import { Button } from '@/components/ui/button'
 import { formatExact, formatLux, THIN_SPACE } from '@/lib/format/number'
 import { LAST_STEP, LEVELS, luxAt, nearestLevel, parseLux, stepOf } from '@/lib/lamp/levels'
-import styles from './lamp.module.css'
+import styles from './light-control.module.css'
+import { Button } from './ui/button'
 
 /**
  * Sets the lamp's light three ways: a slider, a number of lux, and lights people know. Each works without JavaScript,
  * as a form or a link to the same page with `?lux=` or `?step=`.
+ * @param action the page's path
+ * @param kept what else its address holds, sent along by the forms
+ * @param hrefFor the page in another light
  * @param children what the light means, in words, beside the number
  */
 export function LightControl({
+  action,
+  kept = [],
   lux,
+  hrefFor,
   onChange,
   children,
 }: {
+  action: string
+  kept?: readonly (readonly [name: string, text: string])[]
   lux: number
+  hrefFor: (lux: number) => string
   onChange: (lux: number) => void
   children: ReactNode
 }) {
@@ -42,7 +51,8 @@ export function LightControl({
     <div className="grid gap-2">
       <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
         {children}
-        <form action="/" onSubmit={setTypedLux} className="flex flex-wrap items-center gap-2 text-small">
+        <form action={action} onSubmit={setTypedLux} className="flex flex-wrap items-center gap-2 text-small">
+          <Kept pairs={kept} />
           <label htmlFor="light-lux">Lux</label>
           <input
             id="light-lux"
@@ -67,12 +77,13 @@ export function LightControl({
         </form>
       </div>
       <form
-        action="/"
+        action={action}
         className="flex flex-wrap items-center gap-x-4"
         onSubmit={(event) => event.preventDefault()}
         aria-label="Light on the page"
       >
-        <LevelLink level={darkest} lux={lux} onSet={set} />
+        <Kept pairs={kept} />
+        <LevelLink level={darkest} lux={lux} hrefFor={hrefFor} onSet={set} />
         <input
           name="step"
           type="range"
@@ -84,7 +95,7 @@ export function LightControl({
           aria-valuetext={`${name}, about ${formatLux(lux)} lux`}
           className={`${styles.slider} h-11 min-w-32 flex-1 cursor-pointer rounded-card paper:[--slider-track:#000]`}
         />
-        <LevelLink level={brightest} lux={lux} onSet={set} />
+        <LevelLink level={brightest} lux={lux} hrefFor={hrefFor} onSet={set} />
         <noscript>
           <Button type="submit" look="quiet">
             Show this light
@@ -95,7 +106,7 @@ export function LightControl({
       <ul className="flex flex-wrap gap-x-5" aria-label="Lights people know">
         {between.map((level) => (
           <li key={level.lux}>
-            <LevelLink level={level} lux={lux} onSet={set} />
+            <LevelLink level={level} lux={lux} hrefFor={hrefFor} onSet={set} />
           </li>
         ))}
       </ul>
@@ -107,15 +118,17 @@ export function LightControl({
 function LevelLink({
   level,
   lux,
+  hrefFor,
   onSet,
 }: {
   level: (typeof LEVELS)[number]
   lux: number
+  hrefFor: (lux: number) => string
   onSet: (lux: number) => void
 }) {
   return (
     <a
-      href={`?lux=${level.lux}`}
+      href={hrefFor(level.lux)}
       aria-current={level.lux === lux ? 'true' : undefined}
       onClick={(event) => {
         if (event.metaKey || event.ctrlKey || event.shiftKey) return
@@ -127,4 +140,9 @@ function LevelLink({
       {level.name}
     </a>
   )
+}
+
+/** The rest of the address, for forms that would otherwise lose it. */
+export function Kept({ pairs }: { pairs: readonly (readonly [name: string, text: string])[] }) {
+  return pairs.map(([name, text]) => <input key={name} type="hidden" name={name} value={text} />)
 }
