@@ -9,6 +9,7 @@ import { READING_ANCHORS } from '@/lib/vision/contrast-reserve'
 import { deviceInLight } from './in-light'
 import type { NamedSpot } from './request'
 import { spotPhrase } from './spot-phrases'
+import { HEAVY_TO_HOLD, LIGHT_TO_HOLD, LITTLE_TINT, SAME_FIT, SUITS, TINTS, UNSUITED } from './thresholds'
 import { AIM_PHRASES } from './words'
 
 /** What speaks for a device and what against it, each a clause about "it", with the numbers it rests on. */
@@ -78,16 +79,6 @@ function clarityClauses(device: EditionDevice, { answers, spots }: Reader): Clau
   return clauses
 }
 
-/** House: distances from the preferred white, ΔC*ab, up to which a tint goes by these words. */
-const TINTS = [
-  { below: 1.5, words: 'is nearly free of tint', near: 'is very close to' },
-  { below: 3, words: 'has a slight tint', near: 'is a little off' },
-  { below: 4.5, words: 'has a visible tint', near: 'is visibly off' },
-  { below: Infinity, words: 'has a strong tint', near: 'is far from' },
-] as const
-/** House: up to here a tint speaks for a page. */
-const LITTLE_TINT = 3
-
 function tintClause(device: EditionDevice, { answers }: Reader): Clause[] {
   const white = METHOD.criteria.preferredWhite.value[answers.preferredWhite]
   const [a, b] = [device.page.a - white.a, device.page.b - white.b]
@@ -116,14 +107,7 @@ function lightnessClause(device: EditionDevice, { edition, left }: Reader): Clau
   return place <= of / 2 ? clause('lighter than most', true) : clause('darker than most', false)
 }
 
-/** House: grams up to which a device is light for a hold, and from which it is heavy. On a table weight is nothing. */
-const LIGHT_TO_HOLD = { 'one-hand': 200, 'two-hands': 300, table: null } as const
-const HEAVY_TO_HOLD = { 'one-hand': 300, 'two-hands': 450, table: null } as const
 const HOLD_WORDS = { 'one-hand': 'in one hand', 'two-hands': 'in two hands', table: '' } as const
-
-/** House: how well a size must suit, 0–1, to speak for a device, and below what it speaks against it. */
-const SUITS = 0.9
-const UNSUITED = 0.5
 
 function handlingClauses({ weight, diagonal }: EditionDevice, { answers }: Reader): Clause[] {
   const clauses: Clause[] = []
@@ -146,9 +130,6 @@ function handlingClauses({ weight, diagonal }: EditionDevice, { answers }: Reade
   return clauses
 }
 
-/** House: points of fit below which two devices have the same. */
-const SAME = 0.05
-
 /**
  * Where the lead over the next comes from: the aims that bring the most and cost the most points.
  * @returns null where there is no next
@@ -159,7 +140,7 @@ export function leadSentence(
 ): string | null {
   const [first, second] = ranked
   if (!first || !second) return null
-  const same = ranked.filter(({ fit }) => first.fit - fit < SAME)
+  const same = ranked.filter(({ fit }) => first.fit - fit < SAME_FIT)
   if (same.length === ranked.length) return 'Nothing in your answers tells these devices apart: all have the same fit.'
   if (same.length > 1) {
     const names = formatList(same.slice(1, 5).map(({ slug }) => nameOf(slug)))
@@ -173,7 +154,7 @@ export function leadSentence(
   ]
   const ahead = `${points(first.fit - second.fit)} ahead of ${nameOf(second.slug)}`
   const gain = `${points(most.points)} more for ${AIM_PHRASES[most.aim]}`
-  if (least.points > -SAME) return `It is ${ahead}, with ${gain}.`
+  if (least.points > -SAME_FIT) return `It is ${ahead}, with ${gain}.`
   return `It is ${ahead}: ${gain}, ${points(-least.points)} fewer for ${AIM_PHRASES[least.aim]}.`
 }
 

@@ -5,7 +5,7 @@ import Piscina from 'piscina'
 import type { Answers, Edition, MatchAnswer } from '@/lib/method/types'
 import { config } from './config'
 
-export type RankedAnswer = Omit<MatchAnswer, 'assumed'>
+type RankedAnswer = Omit<MatchAnswer, 'assumed'>
 
 /** More rankings are waiting than we can answer soon; try again in some seconds. */
 export class TooBusy extends Error {

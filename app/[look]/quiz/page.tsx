@@ -8,6 +8,7 @@ import { formatsIn, shortlistOf } from '@/lib/quiz/shortlist'
 import { stepTitle } from '@/lib/quiz/steps'
 import { plainNumber } from '@/lib/quiz/values'
 import { latestEdition } from '@/lib/server/editions'
+import { pageMetadata } from '@/lib/server/page-metadata'
 import { QuizRoom } from './quiz-room'
 
 type Search = Record<string, string | string[] | undefined>
@@ -17,12 +18,12 @@ export async function generateMetadata({ searchParams }: Props): Promise<Metadat
   const search = await searchParams
   const step = stepIn(one(search.step))
   const wrong = problemsIn(step, readAddress(pairsFrom(search))).length > 0
-  return {
+  return pageMetadata({
     title: stepTitle(step, wrong),
     description:
       'Five steps: what you read, where, by how much light, and what matters to you. Every step can be skipped.',
-    alternates: { canonical: '/quiz' },
-  }
+    path: '/quiz',
+  })
 }
 
 export default async function QuizPage({ searchParams }: Props) {

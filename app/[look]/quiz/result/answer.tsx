@@ -1,11 +1,11 @@
 import Link from 'next/link'
+import { Changes } from '@/components/result/changes'
+import { InYourLight } from '@/components/result/in-your-light'
 import { groupTies } from '@/lib/method/groups'
-import { Changes } from './changes'
+import type { Result } from '@/lib/quiz/result'
 import { FinePrint } from './fine-print'
-import { InYourLight } from './in-your-light'
 import { Notices } from './notices'
 import { Points } from './points'
-import type { Result } from './result'
 import { Verdict } from './verdict'
 
 /** Rows of the table on one numbered page; fewer in the paper theme, where pages stand in for any long scroll. */

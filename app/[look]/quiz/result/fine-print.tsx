@@ -7,9 +7,9 @@ import { METHOD } from '@/lib/method/constants'
 import { assumptionsOf } from '@/lib/quiz/assumptions'
 import { quizHref, resultHref } from '@/lib/quiz/moves'
 import { notStatedByField } from '@/lib/quiz/not-stated'
+import { deviceOf, type Result } from '@/lib/quiz/result'
 import { toldBy } from '@/lib/quiz/told'
 import { config } from '@/lib/server/config'
-import { deviceOf, type Result } from './result'
 
 /** What was assumed and not stated, the edition and method the result rests on, and the cautions. */
 export function FinePrint({ result }: { result: Result }) {

@@ -1,12 +1,12 @@
+import { NearMisses } from '@/components/result/changes'
 import { ButtonLink } from '@/components/ui/button'
 import { formatList } from '@/lib/format/list'
 import { formatMoney } from '@/lib/format/money'
 import { formatNumber } from '@/lib/format/number'
 import { toll } from '@/lib/quiz/limit-words'
 import { quizHref } from '@/lib/quiz/moves'
-import { NearMisses } from './changes'
+import { deviceOf, type Result } from '@/lib/quiz/result'
 import { FinePrint } from './fine-print'
-import { deviceOf, type Result } from './result'
 
 /** No device meets all of the limits: which limit took how many, what would help, and who came nearest. */
 export function NothingLeft({ result }: { result: Result }) {

@@ -2,8 +2,8 @@ import { ButtonLink } from '@/components/ui/button'
 import { formatList } from '@/lib/format/list'
 import { formatLux, formatNumber, THIN_SPACE } from '@/lib/format/number'
 import { quizHref } from '@/lib/quiz/moves'
+import { type Result, spotsOf } from '@/lib/quiz/result'
 import { FinePrint } from './fine-print'
-import { type Result, spotsOf } from './result'
 
 /** In the reader's light no page can be read, so nothing is ranked: zeros have no order. */
 export function NothingReadable({ result }: { result: Result }) {

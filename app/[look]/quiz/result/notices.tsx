@@ -6,7 +6,7 @@ import { METHOD } from '@/lib/method/constants'
 import { limitWarnings } from '@/lib/method/limits'
 import { eyeOf } from '@/lib/method/reserve'
 import { darkSpots } from '@/lib/quiz/in-light'
-import { deviceOf, type Result, spotsOf } from './result'
+import { deviceOf, type Result, spotsOf } from '@/lib/quiz/result'
 
 /** Sums of shares differ in their last bits. */
 const ROUNDING = 1e-9

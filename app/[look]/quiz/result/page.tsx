@@ -1,26 +1,28 @@
-import type { Metadata } from 'next'
 import { redirect } from 'next/navigation'
 import { completeRequest } from '@/lib/contract/complete-request'
 import { pairsFrom, readAddress } from '@/lib/quiz/address'
 import { resultHref } from '@/lib/quiz/moves'
 import { toRequest } from '@/lib/quiz/request'
+import type { Result } from '@/lib/quiz/result'
 import { latestEdition } from '@/lib/server/editions'
 import { type LookParams, requireLook } from '@/lib/server/look'
 import { matchOnServer, TooBusy } from '@/lib/server/match'
+import { pageMetadata } from '@/lib/server/page-metadata'
 import { Answer } from './answer'
 import { NothingLeft } from './nothing-left'
 import { NothingReadable } from './nothing-readable'
-import type { Result } from './result'
 import { Busy, NothingYet } from './unanswered'
 import { WrongAddress } from './wrong-address'
 import './print.css'
 
-export const metadata: Metadata = {
-  title: 'Your result',
-  description: 'The pages that suit your light, in order of fit, with reasons, doubts and what would change it.',
-  // Each is one reader's own; the address holds their answers.
-  robots: { index: false },
-}
+// Each is one reader's own: its address holds their answers, so it has no other.
+export const generateMetadata = () =>
+  pageMetadata({
+    title: 'Your result',
+    description: 'The pages that suit your light, in order of fit, with reasons, doubts and what would change it.',
+    path: '/quiz/result',
+    index: false,
+  })
 
 type Search = Record<string, string | string[] | undefined>
 

@@ -5,8 +5,8 @@ import { formatNumber, formatShare } from '@/lib/format/number'
 import { derivedUncertainty, expandedFigure } from '@/lib/method/figure-doubts'
 import type { EditionDevice, RankedDevice } from '@/lib/method/types'
 import { resultHref } from '@/lib/quiz/moves'
+import type { Result } from '@/lib/quiz/result'
 import { canonicalTexts } from '@/lib/quiz/write-address'
-import type { Result } from './result'
 import { WeightsForm } from './weights-form'
 
 /** Where the points come from, in groups too close to call, and the weights to move by hand. */

@@ -5,9 +5,9 @@ import type { RankedDevice } from '@/lib/method/types'
 import { MARGIN_WORDS, marginOf, rivalsSentence } from '@/lib/quiz/lead'
 import { quizHref } from '@/lib/quiz/moves'
 import { leadSentence, reasonsFor, sentenceOf } from '@/lib/quiz/reasons'
+import { deviceOf, type Result, spotsOf } from '@/lib/quiz/result'
 import { CopyLink } from './copy-link'
 import { PrintButton } from './print-button'
-import { deviceOf, type Result, spotsOf } from './result'
 
 /** The closest fit, how close the next are, and the reasons, built from its own numbers. */
 export function Verdict({

@@ -3,7 +3,7 @@ import { formatNumber } from '@/lib/format/number'
 import { eyeOf } from '@/lib/method/reserve'
 import type { RankedDevice } from '@/lib/method/types'
 import { deviceInLight, type InLight, PRINT_LIGHTNESS, paperInLight } from '@/lib/quiz/in-light'
-import { deviceOf, type Result, spotsOf } from './result'
+import { deviceOf, type Result, spotsOf } from '@/lib/quiz/result'
 
 /** Contrast reserve of every device left, in each of the reader's spots, with the control paper among them. */
 export function InYourLight({ result, ranked }: { result: Result; ranked: readonly RankedDevice[] }) {

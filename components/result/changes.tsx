@@ -2,7 +2,7 @@ import { formatNumber } from '@/lib/format/number'
 import { prepareAnswers, scoreDevice } from '@/lib/method/fit'
 import { changeSentences } from '@/lib/quiz/changes'
 import { missWords } from '@/lib/quiz/limit-words'
-import { deviceOf, type Result, spotsOf } from './result'
+import { deviceOf, type Result, spotsOf } from '@/lib/quiz/result'
 
 const MOST_MISSES = 4
 

@@ -1,7 +1,6 @@
-import type { Answers, Edition, EditionDevice } from '@/lib/method/types'
-import type { Address } from '@/lib/quiz/address'
-import { type NamedSpot, namedSpots } from '@/lib/quiz/request'
-import type { RankedAnswer } from '@/lib/server/match'
+import type { Answers, Edition, EditionDevice, MatchAnswer } from '@/lib/method/types'
+import type { Address } from './address'
+import { type NamedSpot, namedSpots } from './request'
 
 /** One reader's question and its answer, as the sections of the page need it. */
 export type Result = {
@@ -10,7 +9,7 @@ export type Result = {
   /** Fields the method filled in. */
   assumed: string[]
   edition: Edition
-  match: RankedAnswer
+  match: Omit<MatchAnswer, 'assumed'>
 }
 
 export function deviceOf({ edition }: Pick<Result, 'edition'>, slug: string): EditionDevice {

@@ -1,0 +1,82 @@
+import type { Term } from './term'
+
+/** Words of light and of the eye. */
+export const LIGHT_TERMS: readonly Term[] = [
+  {
+    id: 'lux',
+    name: 'lux',
+    also: ['illuminance', 'lx'],
+    text: 'How much light falls on a surface, lumens to the square metre, weighted as the eye weighs it. A small lamp at arm’s length gives a page some 80, a window without sun some 1,000.',
+    source: 'CIE S 017; the examples are bands of ours',
+    used: { href: '/method#spots', name: 'reading spots' },
+  },
+  {
+    id: 'luminance',
+    name: 'luminance',
+    also: ['cd/m²'],
+    text: 'How much light a surface sends towards you, in candela to the square metre. A matte page sends E·Y/(100·π), E being the lux on it and Y its luminance factor in percent.',
+    source: 'CIE S 017',
+    used: { href: '/method#light', name: 'light on the page' },
+  },
+  {
+    id: 'front-light',
+    name: 'front light',
+    text: 'A device’s own lamp, shining across the page from its edge. We publish the most and the least it gives on a white page in cd/m²; the fit uses the most.',
+    source: 'IEC 62679-3-1; house',
+    used: { href: '/method#q-front-light', name: 'front light, most and least' },
+    quantities: ['front-light'],
+  },
+  {
+    id: 'reading-spot',
+    name: 'reading spot',
+    text: 'A place you read in: how much light falls on the page there, how many hours a week, and whether a front light may be used. The light is a band, not a measurement.',
+    source: 'house',
+    used: { href: '/method#spots', name: 'reading spots' },
+  },
+  {
+    id: 'threshold-contrast',
+    name: 'threshold contrast',
+    text: 'The least contrast an eye can just see, for a given size and brightness. It falls as light grows, quickly in the dark and slowly in the bright.',
+    source: 'Rea & Ouellette 1991; CIE S 017',
+    used: { href: '/method#reserve', name: 'contrast reserve' },
+  },
+  {
+    id: 'contrast-reserve',
+    name: 'contrast reserve',
+    also: ['R'],
+    text: 'How many times more contrast a page gives than the eye needs there. Below 3 we count a spot as unreadable, from 10 on as fluent; at 30 more makes no difference.',
+    source: 'Whittaker & Lovie-Kitchin 1993, from memory; Rea & Ouellette 1991',
+    used: { href: '/method#q-reserve', name: 'contrast reserve' },
+    quantities: ['reserve'],
+  },
+  {
+    id: 'ladder',
+    name: 'ladder',
+    text: 'Our chart of contrast reserve against light, from 1 to 100,000 lux, one curve a page, with the control paper’s beside it.',
+    source: 'house',
+    used: { href: '/devices', name: 'every device’s page' },
+  },
+  {
+    id: 'times-the-light',
+    name: 'times the light of the control paper',
+    text: 'The luminance factor of the control paper over that of a page: how much more light makes this page as bright as that paper.',
+    source: 'house',
+    used: { href: '/method#q-light-needed', name: 'times the light of the control paper' },
+    quantities: ['light-needed'],
+  },
+  {
+    id: 'need-for-light',
+    name: 'need for light',
+    text: 'Whether you often want more light than the people around you. It raises the contrast your eyes need in the computation; we never ask your age.',
+    source: 'house, through the ages of Rea & Ouellette 1991',
+    used: { href: '/for/more-light', name: 'eyes that want more light' },
+  },
+  {
+    id: 'chromatic-adaptation',
+    name: 'chromatic adaptation',
+    also: ['CAT16'],
+    text: 'The eye’s way of taking the light it is in for white. To show on your display how a page looks under a lamp, we carry its colour over by such a transform.',
+    source: 'CIE 248',
+    used: { href: '/light', name: 'In your light' },
+  },
+]
