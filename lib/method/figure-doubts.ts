@@ -31,8 +31,8 @@ export type DerivedDoubts = Record<(typeof ALWAYS)[number], number> & { hue: num
 
 /**
  * Expanded uncertainty U = 2·u of the derived figures of a device, first order with numerical derivatives, channels
- * independent. Session and common errors move page and ink together (the ink on L* only), so they nearly drop out of a
- * contrast ratio. Chroma has no slope at a neutral; there it is given the larger doubt of a* and b*. Method 1,
+ * independent. Session and common errors move page and ink together (the ink on L* only), so they drop out of a contrast
+ * ratio in part. Chroma has no slope at a neutral; there it is given the larger doubt of a* and b*. Method 1,
  * section 1; JCGM 100, 5.1.2.
  */
 export function derivedUncertainty(device: Measured, uncertainty: Uncertainty): DerivedDoubts {

@@ -1,13 +1,18 @@
 import { renderToStaticMarkup } from 'react-dom/server'
 import { describe, expect, test } from 'vitest'
-import MethodPage from '@/app/[look]/method/page'
+import { CONTENTS } from '@/app/[look]/method/contents'
+import { HOUSE_WORDS } from '@/app/[look]/method/house-words'
+import { MethodView } from '@/app/[look]/method/method-view'
 import { QUANTITIES } from '@/app/[look]/method/quantities'
+import { SEEN } from '@/lib/compare/seen'
 import { editionSchema } from '@/lib/contract/edition'
 import { matchAnswerSchema } from '@/lib/contract/match-answer'
 import { formatExact } from '@/lib/format/number'
 import { METHOD } from '@/lib/method/constants'
+import { COVERAGE_FACTOR } from '@/lib/stats/uncertainty'
+import { makeMethodData } from '@/tests/fixtures/method-data'
 
-const html = renderToStaticMarkup(<MethodPage />)
+const html = renderToStaticMarkup(<MethodView data={makeMethodData()} />)
 const text = plain(html)
 
 /** Every number inside a constant, however deep. */
@@ -126,8 +131,67 @@ test('the page prints the model’s check value as the code computes it', () => 
   expect(text).toContain('18.738')
 })
 
-test('each address in the contents is a section of the page', () => {
-  const targets = [...html.matchAll(/href="#([a-z]+)"/g)].map(([, id]) => id)
-  expect(targets).toHaveLength(9)
-  for (const id of targets) expect(html).toContain(`<section id="${id}"`)
+/** Addresses other pages link to: they must never move. */
+const ADDRESSES = 'spots figures light reserve criteria weights fit limits example budget controls words unknowns'
+
+test('each address in the contents is a section of the page, in that order and with that title', () => {
+  const contents = html.slice(html.indexOf('On this page'), html.indexOf('<section'))
+  const targets = [...contents.matchAll(/href="#([a-z]+)"/g)].map(([, id]) => id)
+  expect(targets.join(' ')).toBe(ADDRESSES)
+  const sections = [...html.matchAll(/<section id="([a-z]+)"/g)].map(([, id]) => id)
+  expect(sections).toEqual(targets)
+  for (const [number, { id, title }] of CONTENTS.entries()) {
+    const heading = plain(html.slice(html.indexOf(`<h2 id="${id}-title"`)).split('</h2>')[0] ?? '')
+    expect(heading.trim().startsWith(`${number}. ${title}`), heading).toBe(true)
+  }
+})
+
+test('no two elements of the page have the same address', () => {
+  const ids = [...html.matchAll(/ id="([^"]+)"/g)].map(([, id]) => id)
+  expect(ids.filter((id, i) => ids.indexOf(id) !== i)).toEqual([])
+})
+
+/** The part of the page from a section's start to the next one's. */
+const section = (id: string) => html.slice(html.indexOf(`<section id="${id}"`)).split(/<section id="[a-z]+"/)[1] ?? ''
+
+// JCGM 100, 5.1.2, by hand for the fixture: 2 units, 2 sets, 10 readings, one half of the sets in each session.
+test('the budget prints the parts and what they make together, with the coverage factor', () => {
+  const own = Math.sqrt(0.36 ** 2 / 2 + 0.14 ** 2 / 2 + 0.05 ** 2 / 10)
+  const all = Math.hypot(own, 0.12 * Math.SQRT1_2, 0.25)
+  const budget = section('budget').split(/<tr\b/).map(plain)
+  const row = (name: string) => budget.find((line) => line.includes(name) && line.includes('√'))
+  expect(row('Units of a model')).toContain((0.36 / Math.SQRT2).toFixed(3))
+  expect(budget.find((line) => line.includes(`Expanded, k = ${COVERAGE_FACTOR}`))).toContain((2 * all).toFixed(3))
+  expect(plain(section('budget'))).toMatch(/The largest part of L\*: units of a model/)
+})
+
+test('the control charts say which session is outside, since when all is well, and what was done', () => {
+  const controls = plain(section('controls'))
+  expect(controls).toContain('Outside the limits: session-7 (12 February 2026).')
+  expect(controls).toContain('10 February 2026, Example sphere: Serviced.')
+})
+
+test('every word that stands for a number is listed with it', () => {
+  const words = section('words').split(/<tr\b/).map(plain)
+  for (const { words: said, holds } of HOUSE_WORDS) {
+    expect(
+      words.find((row) => row.includes(said) && row.includes(holds)),
+      said,
+    ).toBeDefined()
+  }
+  // The second threshold of side-by-side seeing, lib/compare.
+  expect(words.find((row) => row.includes(SEEN[2].words))).toContain(`from ${SEEN[2].from}`)
+})
+
+describe('where no edition has been released', () => {
+  const start = { ...makeMethodData().start, from: null }
+  const none = { edition: null, bench: null, sets: [], series: [], events: [], devices: [], start }
+  const empty = plain(renderToStaticMarkup(<MethodView data={makeMethodData(none)} />))
+  test('the method is all there, and each part that needs one says so', () => {
+    expect(empty).toContain('so there is nothing to budget')
+    expect(empty).toContain('so there are no control charts')
+    expect(empty).toContain('starts from the method’s bright reference page')
+    expect(empty).toContain('No doubts: without an edition')
+    expect(empty).toContain('Constants of the contrast reserve')
+  })
 })

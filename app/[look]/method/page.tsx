@@ -1,66 +1,18 @@
-import type { Metadata } from 'next'
-import { CriteriaSection } from './sections/criteria'
-import { FiguresSection } from './sections/figures'
-import { FitSection } from './sections/fit'
-import { LightSection } from './sections/light'
-import { LimitsSection } from './sections/limits'
-import { ReserveSection } from './sections/reserve'
-import { SpotsSection } from './sections/spots'
-import { UnknownsSection } from './sections/unknowns'
-import { WeightsSection } from './sections/weights'
+import { pageMetadata } from '@/lib/server/page-metadata'
+import { methodData } from './data'
+import { MethodView } from './method-view'
 
 export const dynamic = 'force-static'
 export const revalidate = 60
 
-export const metadata: Metadata = {
-  title: 'Method 1',
-  description:
-    'How Lampleaf turns spectrophotometer readings and your answers into a ranking: every formula, constant and source, and what is only from memory or chosen by us.',
-}
+export const generateMetadata = () =>
+  pageMetadata({
+    title: 'Method 1',
+    description:
+      'How Lampleaf turns spectrophotometer readings and your answers into a ranking: every formula, constant and source, a worked example you can change, the uncertainty budget and the control charts.',
+    path: '/method',
+  })
 
-const CONTENTS = [
-  ['spots', 'Reading spots, and what we assume'],
-  ['figures', 'From readings to a published figure'],
-  ['light', 'Light on the page'],
-  ['reserve', 'Contrast reserve'],
-  ['criteria', 'Four criteria'],
-  ['weights', 'Weights'],
-  ['fit', 'Fit, ties and ranks'],
-  ['limits', 'Limits, and what would change the answer'],
-  ['unknowns', 'What we do not know'],
-] as const
-
-export default function MethodPage() {
-  return (
-    <main className="measure py-12">
-      <h1>Method 1</h1>
-      <p className="mt-4 max-w-[60ch] text-lead text-soft">
-        We read how much light each page gives back, work out how well it reads where you read, and say how sure we are.
-        Every formula and constant that makes a figure or moves a rank is here, with where it is from.
-      </p>
-      <p className="mt-4 max-w-[68ch]">
-        The tables are made from the same constants the ranking computes with. <em>Published</em> means we could name
-        where it is printed; <em>from memory</em> that we recall it and have not read it again; <em>house</em> that we
-        chose it; <em>common practice</em> that the trade does it and nobody we know of wrote why.
-      </p>
-      <nav aria-label="On this page" className="mt-8">
-        <ol start={0} className="list-inside list-decimal columns-1 md:columns-2">
-          {CONTENTS.map(([id, title]) => (
-            <li key={id} className="py-1">
-              <a href={`#${id}`}>{title}</a>
-            </li>
-          ))}
-        </ol>
-      </nav>
-      <SpotsSection />
-      <FiguresSection />
-      <LightSection />
-      <ReserveSection />
-      <CriteriaSection />
-      <WeightsSection />
-      <FitSection />
-      <LimitsSection />
-      <UnknownsSection />
-    </main>
-  )
+export default async function MethodPage() {
+  return <MethodView data={await methodData()} />
 }

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react'
+import type { SectionId } from './contents'
 import { QUANTITIES, type Quantity } from './quantities'
 
 /** One section of the method: its heading, plain words first, and the quantities it defines as targets of links. */
@@ -8,7 +9,7 @@ export function MethodSection({
   title,
   children,
 }: {
-  id: Quantity['section'] | 'spots' | 'unknowns'
+  id: SectionId
   number: number
   title: string
   children: ReactNode
