@@ -124,7 +124,7 @@ test.describe('methods', () => {
   }
 
   test('an address the API does not have is a problem, not a page', async ({ request }) => {
-    for (const path of ['/api/v1', '/api/v1/devices', '/api/v1/match/1']) {
+    for (const path of ['/api/v1', '/api/v1/makers', '/api/v1/match/1']) {
       await fieldsOf(await request.get(path), 404)
     }
   })
