@@ -3,19 +3,30 @@ import type { ReactNode } from 'react'
 import { Footer } from '@/components/site/footer'
 import { Masthead } from '@/components/site/masthead'
 import { config } from '@/lib/server/config'
+import { latestEdition } from '@/lib/server/editions'
 import { type LookParams, requireLook } from '@/lib/server/look'
+import { openGraphFor } from '@/lib/server/page-metadata'
 import { fontVariables } from '../fonts'
 import '../globals.css'
+import { HOME_DESCRIPTION } from './(home)/home-metadata'
 
 /** Nothing is made at build time: the site's own address and its database are known to a running process alone. */
 export async function generateMetadata(): Promise<Metadata> {
   return {
     metadataBase: new URL(config().baseUrl),
     title: { default: 'Lampleaf: find the page that suits your light', template: '%s · Lampleaf' },
-    description:
-      'How light, how white and how tinted the pages of electronic-paper reading devices are, measured, each figure with its doubt, and a quiz that finds the page for the light you read in.',
+    description: HOME_DESCRIPTION,
+    // A page without a picture of its own shows the site's.
+    openGraph: openGraphFor('/', await latestEdition()),
+    twitter: { card: 'summary_large_image' },
   }
 }
+
+/** Where the news can be followed, in the two forms readers of feeds know. */
+const FEEDS = [
+  { type: 'application/atom+xml', href: '/feed.xml' },
+  { type: 'application/feed+json', href: '/feed.json' },
+]
 
 export const viewport: Viewport = { width: 'device-width', initialScale: 1 }
 
@@ -25,6 +36,17 @@ export default async function RootLayout({ children, params }: Props) {
   const look = await requireLook(params)
   return (
     <html lang="en-GB" data-theme={look.theme ?? undefined} className={fontVariables}>
+      <head>
+        {FEEDS.map(({ type, href }) => (
+          <link
+            key={href}
+            rel="alternate"
+            type={type}
+            href={href}
+            title="Lampleaf: editions, corrections and new devices"
+          />
+        ))}
+      </head>
       <body className="flex min-h-dvh flex-col">
         <a
           href="#content"

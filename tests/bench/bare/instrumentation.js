@@ -1,0 +1,2 @@
+// Its own, so that the folders above are not searched for one.
+export function register() {}
