@@ -42,6 +42,9 @@ const config: NextConfig = {
   // The image optimizer has had remote code execution advisories, and nothing here needs it.
   images: { unoptimized: true },
   serverExternalPackages: ['postgres', 'piscina'],
+  // Finished pages live in the process: on disk they would outlive it, and belong to whichever database it served.
+  experimental: { isrFlushToDisk: false },
+  cacheMaxMemorySize: 128 * 1024 * 1024,
   cacheHandler: development ? undefined : fileURLToPath(new URL('./lib/page-cache.mjs', import.meta.url)),
   async headers() {
     return [{ source: '/:path*', headers: securityHeaders }]

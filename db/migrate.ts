@@ -4,6 +4,8 @@ import { fileURLToPath } from 'node:url'
 import { drizzle } from 'drizzle-orm/postgres-js'
 import { migrate } from 'drizzle-orm/postgres-js/migrator'
 import postgres from 'postgres'
+import { keepMissingDatasets } from './editions/keep-dataset'
+import * as schema from './schema'
 
 const FOLDER = join(dirname(fileURLToPath(import.meta.url)), 'migrations')
 /** Any fixed number: whoever migrates holds this advisory lock, so that two deployments do not run at once. */
@@ -32,6 +34,7 @@ export async function migrateDatabase(url: string): Promise<{ applied: number; f
     await client`set lock_timeout = '2s'`
     const before = await countApplied(client)
     await migrate(drizzle(client), { migrationsFolder: FOLDER })
+    await keepMissingDatasets(drizzle(client, { schema }))
     const applied = await countApplied(client)
     if (applied !== journal.entries.length) {
       throw new Error(`${applied} migrations are applied, but the journal lists ${journal.entries.length}`)

@@ -7,7 +7,7 @@ const Base = FileSystemCache.default ?? FileSystemCache
 const NOT_HERE = /\/not-here$/
 
 /**
- * Next's own cache of finished pages, with the policy of each page beside it: the hashes of its inline scripts are
+ * Next's own cache of finished pages, in memory, with the policy of each page beside it: the hashes of its inline scripts are
  * worked out once, when the page is made, and sent with every answer from the cache.
  */
 export default class PageCache extends Base {
@@ -18,7 +18,7 @@ export default class PageCache extends Base {
       const policy = contentSecurityPolicy(inlineScriptHashes(html))
       value.headers = { ...value.headers, 'content-security-policy': policy }
     }
-    // Anybody can ask for addresses without end; what is not there must not fill the disk.
+    // Anybody can ask for addresses without end; what is not there must not crowd out what is.
     if (value.status === 404 && !NOT_HERE.test(key)) return
     return super.set(key, value, context)
   }

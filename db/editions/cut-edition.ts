@@ -20,6 +20,7 @@ import {
 import { listCandidates } from './candidates'
 import { commonUncertainty, controlPaper, sessionUncertainty } from './controls'
 import { statedFacts } from './facts'
+import { keepDataset } from './keep-dataset'
 
 /** Any fixed number: one edition is cut at a time, so that numbers have no gaps. */
 const LOCK = 8785
@@ -32,8 +33,8 @@ export type Cut = {
 }
 
 /**
- * Cuts and releases the next edition: works every figure out from the readings, freezes document, entries and hash in
- * one transaction. Of each device the newest revision with sets of both states counts; a device without is left out.
+ * Cuts and releases the next edition: works every figure out from the readings, freezes document, entries, hash and the
+ * files of its data set in one transaction. Of each device the newest revision with sets of both states counts; a device without is left out.
  * @returns the released document
  * @throws Error where nothing counts yet: no device, or no control of a kind the figures rest on
  */
@@ -80,6 +81,7 @@ export function cutEdition(db: Db, { publishedAt, title, note }: Cut): Promise<E
         setIds,
       })),
     )
+    await keepDataset(tx, number)
     return document
   })
 }

@@ -1,11 +1,23 @@
 import { and, asc, eq, inArray } from 'drizzle-orm'
+import type { Dataset } from '@/lib/dataset/files'
 import type { DatasetSource } from '@/lib/dataset/source'
 import { roundLab } from '@/lib/edition/document'
 import type { Lab } from '@/lib/method/types'
 import type { Db } from '../client'
 import { controlPaper, sessionUncertainty } from '../editions/controls'
 import { sessionCounts } from '../editions/session-counts'
-import { controlReadings, controlSamples, editionEntries, editions, readings, sessions, sets, units } from '../schema'
+import {
+  controlReadings,
+  controlSamples,
+  editionDatasets,
+  editionEntries,
+  editionFiles,
+  editions,
+  readings,
+  sessions,
+  sets,
+  units,
+} from '../schema'
 
 /**
  * What a released edition rests on, row by row, and always the same rows: its document, the sets its entries name with
@@ -32,6 +44,20 @@ export async function findDatasetSource(db: Db, number: number): Promise<Dataset
     sessions: await listSessions(db, publishedAt),
     controls: await listControls(db, publishedAt),
   }
+}
+
+/** An edition's data set as it was released; null where there is no such edition. */
+export async function findDataset(db: Db, edition: number): Promise<Dataset | null> {
+  const [kept] = await db.select().from(editionDatasets).where(eq(editionDatasets.edition, edition))
+  if (!kept) return null
+  const { name, type, bytes, sha256 } = editionFiles
+  const files = await db
+    .select({ name, type, bytes, sha256 })
+    .from(editionFiles)
+    .where(eq(editionFiles.edition, edition))
+    .orderBy(asc(editionFiles.place))
+  const { measuredFrom, measuredTo, rows } = kept
+  return { files: new Map(files.map((file) => [file.name, file])), measuredFrom, measuredTo, rows }
 }
 
 /** Every reading in the sets that an edition's figures of a device rest on, in the order of sets and of time. */

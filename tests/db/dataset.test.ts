@@ -1,9 +1,10 @@
 import { createHash } from 'node:crypto'
 import { eq, sql } from 'drizzle-orm'
 import { afterAll, beforeAll, describe, expect, test } from 'vitest'
-import { findDatasetSource, listDeviceReadings } from '@/db/queries/dataset'
+import { keepDataset, keepMissingDatasets } from '@/db/editions/keep-dataset'
+import { findDataset, findDatasetSource, listDeviceReadings } from '@/db/queries/dataset'
 import { findEdition } from '@/db/queries/editions'
-import { controlReadings, instruments, prices, sessions, sets, specs } from '@/db/schema'
+import { controlReadings, editionFiles, instruments, prices, sessions, sets, specs } from '@/db/schema'
 import { type Dataset, writeDataset } from '@/lib/dataset/files'
 import { TABLES } from '@/lib/dataset/tables'
 import { readCsv } from '@/tests/dataset/read-csv'
@@ -14,7 +15,7 @@ let seeded: Awaited<ReturnType<typeof createSeededDatabase>>
 const datasets: Record<number, Dataset> = {}
 beforeAll(async () => {
   seeded = await createSeededDatabase(2)
-  for (const number of [1, 2, 3]) datasets[number] = writeDataset((await findDatasetSource(seeded.db, number))!)
+  for (const number of [1, 2, 3]) datasets[number] = (await findDataset(seeded.db, number))!
 })
 afterAll(() => seeded.drop())
 
@@ -144,16 +145,18 @@ describe.each([1, 2, 3])('the downloads of edition %i', (number) => {
     }
   })
 
-  test('are the same bytes whenever they are written', async () => {
+  test('are kept at the release, the same bytes as when they are written again', async () => {
     expect(sums(writeDataset((await findDatasetSource(seeded.db, number))!))).toBe(sums(datasets[number]!))
   })
 })
 
 describe('a released edition’s downloads stay as they are', () => {
-  const unchanged = (work: (tx: Parameters<Parameters<typeof rollingBack>[1]>[0]) => Promise<unknown>) =>
+  type Tx = Parameters<Parameters<typeof rollingBack>[1]>[0]
+  const unchanged = (work: (tx: Tx) => Promise<unknown>) =>
     rollingBack(seeded.db, async (tx) => {
       await work(tx)
       for (const number of [1, 2, 3]) {
+        expect(sums((await findDataset(tx, number))!)).toBe(sums(datasets[number]!))
         expect(sums(writeDataset((await findDatasetSource(tx, number))!))).toBe(sums(datasets[number]!))
       }
     })
@@ -183,7 +186,7 @@ describe('a released edition’s downloads stay as they are', () => {
         .values({ ...rest, name: 'later', startedAt: new Date('2026-11-25'), endedAt: new Date('2026-11-26') })
     }))
 
-  test('and are held back where a control written down late would change what they rest on', () =>
+  test('even where a control written down late would change what they rest on: none are written anew then', () =>
     rollingBack(seeded.db, async (tx) => {
       const [first] = await tx.select().from(sessions).where(eq(sessions.name, '2025-09-24-a'))
       const { id: _, ...rest } = first!
@@ -202,12 +205,43 @@ describe('a released edition’s downloads stay as they are', () => {
           bStar: 0,
         })),
       )
+      expect(sums((await findDataset(tx, 1))!)).toBe(sums(datasets[1]!))
       await expect(findDatasetSource(tx, 1)).rejects.toThrow(/controls kept for edition 1/)
     }))
+
+  test('by the database’s own rule, whoever asks for a change', async () => {
+    for (const work of [
+      (tx: Tx) => tx.update(editionFiles).set({ type: 'text/plain' }),
+      (tx: Tx) => tx.delete(editionFiles),
+      (tx: Tx) => tx.execute(sql`truncate edition_datasets cascade`),
+      (tx: Tx) => tx.execute(sql`update edition_datasets set measured_to = '2030-01-01'`),
+    ]) {
+      const refused = rollingBack(seeded.db, async (tx) => void (await work(tx)))
+      await expect(refused).rejects.toMatchObject({ cause: { message: expect.stringMatching(/never changes/) } })
+    }
+  })
+
+  test('and each file’s checksum is held to its bytes', async () => {
+    const wrong = rollingBack(seeded.db, async (tx) => {
+      const file = { edition: 1, place: 99, name: 'x.csv', type: 'text/csv', bytes: new Uint8Array([1]), sha256: 'ab' }
+      await tx.insert(editionFiles).values(file)
+    })
+    await expect(wrong).rejects.toMatchObject({ cause: { constraint_name: 'edition_files_sha256_of_bytes' } })
+  })
+})
+
+test('an edition has its files once, and only those without are given any', async () => {
+  await keepMissingDatasets(seeded.db)
+  expect(sums((await findDataset(seeded.db, 2))!)).toBe(sums(datasets[2]!))
+  await expect(rollingBack(seeded.db, (tx) => keepDataset(tx, 2))).rejects.toMatchObject({
+    cause: { constraint_name: 'edition_datasets_pkey' },
+  })
+  await expect(rollingBack(seeded.db, (tx) => keepDataset(tx, 4))).rejects.toThrow('no edition 4')
 })
 
 test('an edition that was never released has no data set', async () => {
   expect(await findDatasetSource(seeded.db, 4)).toBeNull()
+  expect(await findDataset(seeded.db, 4)).toBeNull()
 })
 
 test('the readings of a device are those its figures rest on, a flagged one among them', async () => {

@@ -145,7 +145,9 @@ describe('editions', () => {
   ])
 
   // PostgreSQL refuses to empty a table others point at, before any trigger; with them all at once the trigger speaks.
-  refused([['editions_immutable', 'truncate editions, edition_entries, corrections, replies']])
+  refused([
+    ['editions_immutable', 'truncate editions, edition_entries, corrections, replies, edition_datasets, edition_files'],
+  ])
 
   /** Statements that add a made-up edition like the third, changed by JSON. */
   const edition = (changes: string, number = 4, day = '2026-12-01') => {

@@ -20,8 +20,7 @@ export async function POST(request: Request): Promise<Response> {
   const pages = publicPages(edition, changes)
   const now = JSON.stringify([edition?.number, changes.editions, changes.corrections, ...changes.devices])
   const changed = now !== shown
-  // At its start a process finds what an earlier one left on disk.
-  if (changed) revalidatePath('/', 'layout')
+  if (changed && shown !== null) revalidatePath('/', 'layout')
   shown = now
   return Response.json({ changed, paths: pages.map(({ path }) => path) }, { headers: { 'Cache-Control': 'no-store' } })
 }
