@@ -36,6 +36,8 @@ const config: NextConfig = {
   distDir: process.env.NEXT_DIST_DIR ?? '.next',
   pageExtensions: withSpecimen ? ['tsx', 'ts', 'specimen.tsx'] : ['tsx', 'ts'],
   poweredByHeader: false,
+  // The front squeezes answers (lib/serving/squeeze.mjs): Brotli, which sees repetitions far apart, beside gzip.
+  compress: false,
   reactStrictMode: true,
   // Titles come with the page, for every reader: streamed after it, they arrive late and at the wrong place.
   htmlLimitedBots: /.*/,
@@ -43,7 +45,7 @@ const config: NextConfig = {
   images: { unoptimized: true },
   serverExternalPackages: ['postgres', 'piscina'],
   // Finished pages live in the process: on disk they would outlive it, and belong to whichever database it served.
-  experimental: { isrFlushToDisk: false },
+  experimental: { isrFlushToDisk: false, inlineCss: true },
   cacheMaxMemorySize: 128 * 1024 * 1024,
   cacheHandler: development ? undefined : fileURLToPath(new URL('./lib/page-cache.mjs', import.meta.url)),
   async headers() {

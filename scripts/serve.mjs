@@ -4,6 +4,7 @@ import next from 'next'
 import { frontOf } from '../lib/serving/front.mjs'
 import { keepCurrent } from '../lib/serving/keep-current.mjs'
 import { createPageStore } from '../lib/serving/page-store.mjs'
+import { squeezed } from '../lib/serving/squeeze.mjs'
 
 const hostname = process.env.HOST ?? '127.0.0.1'
 const port = Number(process.env.PORT ?? 3000)
@@ -12,7 +13,7 @@ const app = next({ dev: false, dir: process.cwd(), hostname, port })
 await app.prepare()
 
 const store = createPageStore()
-const server = createServer(frontOf(app.getRequestHandler(), store))
+const server = createServer(frontOf(squeezed(app.getRequestHandler()), store))
 // A slow sender must not hold a place for ever; a proxy in front keeps its connections open longer than we do.
 server.headersTimeout = 15_000
 server.requestTimeout = 30_000

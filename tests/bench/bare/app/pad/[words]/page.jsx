@@ -4,7 +4,9 @@ import { Tap } from './tap'
 export const dynamic = 'force-static'
 export const revalidate = 60
 
-/** A static page as long as one likes, with one thing to tap. */
+const ROWS = Array.from({ length: 16 }, (_, row) => row + 1)
+
+/** A static page as long as one likes, with what any page of such an application has to touch: one thing of each kind. */
 export default async function Page({ params }) {
   const { words } = await params
   const paragraphs = Array.from({ length: 8 }, (_, i) => i)
@@ -14,6 +16,23 @@ export default async function Page({ params }) {
     <main>
       <h1>A bare page</h1>
       <Tap />
+      <details>
+        <summary>A table</summary>
+        <table>
+          <tbody>
+            {ROWS.map((row) => (
+              <tr key={row}>
+                {ROWS.slice(0, 6).map((column) => (
+                  <td key={column}>{row * column}</td>
+                ))}
+              </tr>
+            ))}
+          </tbody>
+        </table>
+      </details>
+      <p>
+        <label htmlFor="field">A field</label> <input id="field" /> <a href="/pad/0">A link</a>
+      </p>
       {paragraphs.map((i) => (
         <p key={i}>{all.slice(i * each, (i + 1) * each).join(' ')}</p>
       ))}
