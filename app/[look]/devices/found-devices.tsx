@@ -37,6 +37,7 @@ export function FoundDevices({
         <DevicesTable
           caption={tableWords(list.known.length, filtered ? 'match' : 'all', sort)}
           rows={known}
+          className="later"
           {...{ query, sort, look }}
         />
       )}

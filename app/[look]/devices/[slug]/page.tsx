@@ -121,7 +121,7 @@ export default async function DevicePage({ params }: Props) {
       </div>
       <PrintFoot record={record} entry={entry} timesTheLight={figures.timesTheLight} units={units} address={address} />
       <Contents parts={hasRevisions ? PARTS : PARTS.filter(({ id }) => id !== 'revisions')} />
-      <div className="mt-10 grid gap-x-10 gap-y-10 lg:grid-cols-[minmax(0,1.8fr)_minmax(0,1fr)] print:hidden">
+      <div className="later mt-10 grid gap-x-10 gap-y-10 lg:grid-cols-[minmax(0,1.8fr)_minmax(0,1fr)] print:hidden">
         <section aria-labelledby="map" className="card min-w-0 p-5">
           <h2 id="map" className="text-h3">
             Where its page sits among the whites

@@ -25,7 +25,7 @@ export function Answer({ result, page, paper }: { result: Result; page: number |
       <div className="measure grid gap-12 pt-10 print:gap-2 print:pt-2">
         <Notices result={result} />
         <Points result={result} groups={groups} paging={paging} />
-        <div className="grid gap-x-12 gap-y-10 lg:grid-cols-[minmax(0,1.45fr)_minmax(0,1fr)] print:block">
+        <div className="later grid gap-x-12 gap-y-10 lg:grid-cols-[minmax(0,1.45fr)_minmax(0,1fr)] print:block">
           <InYourLight result={result} ranked={readable} />
           <Changes result={result} />
         </div>
