@@ -14,14 +14,14 @@ export function sectionsOf(groups: readonly (readonly RankedDevice[])[]): Sectio
       last.rows.push(...group)
       return
     }
-    sections.push({ title: titleOf(i, alone), rows: [...group], alone })
+    sections.push({ title: titleOf(i, alone, groups[0]?.length ?? 0), rows: [...group], alone })
   })
   return sections
 }
 
-function titleOf(index: number, alone: boolean): string {
+function titleOf(index: number, alone: boolean, ahead: number): string {
   if (index === 0) return alone ? 'Ahead of the others' : 'Too close to call'
-  return `${index === 1 ? 'Behind them' : 'Behind those'}${alone ? '' : ', too close to call'}`
+  return `${index > 1 ? 'Behind those' : ahead === 1 ? 'Behind it' : 'Behind them'}${alone ? '' : ', too close to call'}`
 }
 
 /** Only the rows of one page, under the headings they belong to. */

@@ -119,7 +119,9 @@ function specRows(device: ScenarioDevice, revisionId: number, since: string): Sp
     truth('frontLight', device.frontLight !== null, TRIED),
     device.water === 0 ? truth('water', false, SHEET) : number('water', device.water, SHEET),
     truth('pageButtons', device.pageButtons, TRIED),
-    truth('onSale', device.onSale, 'seen in shops'),
+    device.onSale === false
+      ? { ...truth('onSale', false, 'asked in shops, none has it any more'), statedOn: '2025-11-01' }
+      : truth('onSale', device.onSale, 'seen in shops'),
     truth('lending', device.lending, TRIED),
     truth('speech', device.speech, TRIED),
     device.formats === null ? truth('formats', null, SHEET) : row('formats', SHEET, { list: device.formats }),

@@ -33,19 +33,21 @@ export function Footer({ look }: { look: Look }) {
               <ul className="mt-1 grid text-small">
                 {rooms.map((room) => (
                   <li key={room.href}>
-                    <Link prefetch={false} href={room.href} className="inline-flex min-h-9 items-center">
+                    <Link prefetch={false} href={room.href} className="inline-flex min-h-11 items-center md:min-h-9">
                       {room.name}
                     </Link>
                   </li>
                 ))}
+                {name === 'Checking' && (
+                  <li>
+                    <a href="/feed.xml" className="inline-flex min-h-11 items-center md:min-h-9">
+                      News as a feed
+                    </a>
+                  </li>
+                )}
               </ul>
             </section>
           ))}
-          <p className="col-span-2 mt-1 text-small">
-            <a href="/feed.xml" className="inline-flex min-h-9 items-center">
-              News as a feed
-            </a>
-          </p>
         </nav>
         <LookChoice look={look} />
       </div>

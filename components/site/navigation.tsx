@@ -3,7 +3,9 @@
 import Link from 'next/link'
 import { usePathname } from 'next/navigation'
 import { publicPath } from '@/lib/look'
-import { isIn, ROOMS } from './rooms'
+import { ALL_ROOMS, isIn, ROOMS } from './rooms'
+
+const PHONE_ROOMS = ALL_ROOMS.flatMap(({ rooms }) => rooms)
 
 /**
  * The rooms in a line; the one we are in is marked, by the server too, so it needs no JavaScript. Nothing is fetched
@@ -28,7 +30,7 @@ export function WideNavigation() {
   )
 }
 
-/** The same behind a button on a phone. Going to another page closes it: `key` makes a new, closed one. */
+/** Every room behind a button on a phone. Going to another page closes it: `key` makes a new, closed one. */
 export function PhoneNavigation() {
   const pathname = publicPath(usePathname())
   return (
@@ -40,7 +42,7 @@ export function PhoneNavigation() {
         aria-label="Main"
         className="absolute inset-x-0 top-full z-20 grid border-y border-rule bg-sheet px-4 py-2 text-lead"
       >
-        {ROOMS.map((room) => (
+        {PHONE_ROOMS.map((room) => (
           <Link
             prefetch={false}
             key={room.href}

@@ -5,9 +5,11 @@ export type Room = { href: `/${string}`; name: string }
 export const ROOMS: readonly Room[] = [
   { href: '/quiz', name: 'Quiz' },
   { href: '/devices', name: 'Devices' },
+  { href: '/compare', name: 'Compare' },
   { href: '/light', name: 'In your light' },
   { href: '/for', name: 'Readers' },
   { href: '/method', name: 'Method' },
+  { href: '/editions', name: 'Editions' },
   { href: '/data', name: 'Data' },
 ]
 

@@ -16,7 +16,7 @@ export function Pager({ paging, total, what }: { paging: Paging; total: number; 
         </ButtonLink>
       )}
       {page < pages && (
-        <ButtonLink href={hrefFor(page + 1)} rel="next">
+        <ButtonLink look="quiet" href={hrefFor(page + 1)} rel="next">
           Next page
         </ButtonLink>
       )}

@@ -57,7 +57,7 @@ function ofDevice(edition: Edition, slug: string, shared: Shared): Picture | nul
     figure: {
       value: formatNumber(lightness.value, 1),
       doubt: formatDoubt(lightness.doubt, 1),
-      label: 'lightness L* of the page (k = 2)',
+      label: 'lightness L* of the page, at about 95 %',
     },
     sheets: [device],
   }

@@ -8,7 +8,7 @@ import { HEIGHT, type Picture, WIDTH } from './picture'
 
 /** What the sheets say: the beginning of a page, so that the ink is seen as ink. */
 const SAMPLE =
-  'The lamp was lit before anyone had thought of it, and the page lay there as if it had always been that white. Outside, the boats had come in one behind the other; somebody was counting them aloud, and lost count, and began again from the harbour wall.'
+  'The lamp was lit before anyone had thought of it, and the page lay there as if it had always been that white. Outside, the boats had come in one behind the other; somebody was counting them.'
 
 /** Draws a picture as PNG, 1200 × 630. Nothing but the picture's own text and our own fonts goes into it. */
 export async function drawPicture(picture: Picture): Promise<Uint8Array<ArrayBuffer>> {

@@ -44,7 +44,8 @@ function hoursSentence(
   spots: ChangeContext['spots'],
   nameOf: (slug: string) => string,
 ): string {
-  if (!change) return spots.length > 1 ? 'No hours moved from one of your spots to another change first place.' : ''
+  if (!change)
+    return spots.length > 1 ? 'Moving hours from one of your spots to another would not change first place.' : ''
   const hours = formatUnit(change.hours, 'h', Number.isInteger(change.hours) ? 0 : 1)
   const [from, to] = [spots[change.from]?.name, spots[change.to]?.name]
   return `If ${hours} a week moved from “${from}” to “${to}”, ${nameOf(change.first)} would come first.`

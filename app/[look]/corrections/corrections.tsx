@@ -26,7 +26,8 @@ export async function Corrections({ page, total }: { page: number; total: number
     <main className="measure py-12">
       <h1>Corrections</h1>
       <p className="mt-4 max-w-[60ch] text-lead text-soft">
-        Figures we printed and had to change, and what was said about them. Nothing is taken off this page.
+        Figures we printed and had to change, and what was said about them. Nothing is taken off this page. Differences
+        are taken before rounding.
       </p>
       <p className="mt-4 max-w-[68ch]">
         A released{' '}

@@ -1,3 +1,4 @@
+import { TextToCopy } from '@/components/text-to-copy'
 import { Disclosure } from '@/components/ui/disclosure'
 import { LICENCE } from '@/lib/dataset/about'
 import type { Citations } from '@/lib/dataset/citation-files'
@@ -14,10 +15,10 @@ export function Cite({ edition, citations }: { edition: number; citations: Citat
         {citations.text}
       </blockquote>
       <Disclosure summary="BibTeX" className="mt-3">
-        <Source label={`BibTeX of edition ${edition}`} text={citations.bibtex} />
+        <TextToCopy label={`BibTeX of edition ${edition}`} text={citations.bibtex} />
       </Disclosure>
       <Disclosure summary="CITATION.cff">
-        <Source label={`CITATION.cff of edition ${edition}`} text={citations.cff} />
+        <TextToCopy label={`CITATION.cff of edition ${edition}`} text={citations.cff} />
       </Disclosure>
       <p className="mt-3 flex flex-wrap gap-x-6">
         {['citation.txt', 'citation.bib', 'CITATION.cff'].map((name) => (
@@ -27,19 +28,5 @@ export function Cite({ edition, citations }: { edition: number; citations: Citat
         ))}
       </p>
     </>
-  )
-}
-
-/** Text to copy as it stands; long lines scroll inside. */
-export function Source({ label, text }: { label: string; text: string }) {
-  return (
-    <section
-      aria-label={label}
-      className="mt-2 overflow-x-auto border border-rule bg-sheet p-4"
-      // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls sideways must be reachable by keyboard
-      tabIndex={0}
-    >
-      <pre className="text-note">{text}</pre>
-    </section>
   )
 }

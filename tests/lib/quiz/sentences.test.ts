@@ -98,7 +98,7 @@ test('where nothing would change first place, that is said of each kind of chang
   const limits = { budget: 20_000, currency: 'GBP' }
   expect(changeSentences(nothing, { spots, limits, devices: 5, nameOf })).toEqual([
     'No change in how much one aim counts puts the runner-up first.',
-    'No hours moved from one of your spots to another change first place.',
+    'Moving hours from one of your spots to another would not change first place.',
     'No higher budget changes first place.',
   ])
 })

@@ -1,10 +1,10 @@
+import { TextToCopy } from '@/components/text-to-copy'
 import { Disclosure } from '@/components/ui/disclosure'
 import { type Column, Table } from '@/components/ui/table'
 import { curlLine, exampleRequest } from '@/lib/openapi/curl'
 import { type Field, fieldsOf } from '@/lib/openapi/fields'
 import { SCHEMAS } from '@/lib/openapi/schemas'
 import type { Answer, Operation as Described, JsonSchema, Parameter } from '@/lib/openapi/types'
-import { Source } from '../cite'
 
 const PARAMETERS: readonly Column<Parameter>[] = [
   { key: 'name', head: 'Parameter', label: 'Parameter', heading: true, cell: ({ name }) => <code>{name}</code> },
@@ -70,7 +70,7 @@ export function OperationSection({
       </p>
       <p className="mt-3 max-w-[68ch]">{description}</p>
       <h3 className="mt-5">Example</h3>
-      <Source label={`Example: ${summary}`} text={curlLine(exampleRequest(path, method, operation), origin)} />
+      <TextToCopy label={`Example: ${summary}`} text={curlLine(exampleRequest(path, method, operation), origin)} />
       {parameters.length > 0 && (
         <Table
           className="mt-6"

@@ -69,7 +69,11 @@ function Big({
   return (
     <div>
       <dt className="text-note text-soft">
-        <Link href={`/method#q-${id}`} prefetch={false} className="text-soft">
+        <Link
+          href={`/method#q-${id}`}
+          prefetch={false}
+          className="inline-flex min-h-11 items-center text-soft md:min-h-6"
+        >
           {name}
         </Link>
       </dt>

@@ -1,4 +1,5 @@
 import Link from 'next/link'
+import { TextToCopy } from '@/components/text-to-copy'
 import { Disclosure } from '@/components/ui/disclosure'
 import { citationBibtex } from '@/lib/cite/bibtex'
 import { citationCff } from '@/lib/cite/cff'
@@ -21,20 +22,9 @@ export function Cite({ work, slug }: { work: Work; slug: string }) {
         .
       </p>
       <Disclosure summary="For reference managers: BibTeX and CFF" className="mt-1">
-        <Code name="BibTeX">{citationBibtex(work)}</Code>
-        <Code name="Citation File Format (CITATION.cff)">{citationCff(work)}</Code>
+        <TextToCopy label="Citation as BibTeX" text={citationBibtex(work)} />
+        <TextToCopy label="Citation as CITATION.cff" text={citationCff(work)} />
       </Disclosure>
     </section>
-  )
-}
-
-function Code({ name, children }: { name: string; children: string }) {
-  return (
-    <figure className="mt-3">
-      <figcaption className="text-note text-soft">{name}</figcaption>
-      <pre className="mt-1 rounded-card border border-rule bg-sheet p-3 font-text text-note wrap-anywhere whitespace-pre-wrap">
-        {children}
-      </pre>
-    </figure>
   )
 }

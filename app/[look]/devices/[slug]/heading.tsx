@@ -1,5 +1,7 @@
 import Link from 'next/link'
+import { ButtonLink } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
+import { compareHref } from '@/lib/compare/address'
 import { formatDay, formatMonth } from '@/lib/format/date'
 import { formatDiagonal } from '@/lib/format/measures'
 import { formatMoney } from '@/lib/format/money'
@@ -25,7 +27,7 @@ export function Heading({
 }) {
   return (
     <header>
-      <h1 className="text-display">{device.name}</h1>
+      <h1 className="md:text-display">{device.name}</h1>
       <p className="mt-3 text-lead text-soft">
         {inOneLine(device, units)}{' '}
         {device.price && pricedOn && `${formatMoney(device.price)} in ${formatMonth(pricedOn)}.`}
@@ -36,6 +38,12 @@ export function Heading({
           edition {edition.number}
         </Link>
         , released <time dateTime={edition.publishedAt}>{formatDay(edition.publishedAt)}</time>.
+      </p>
+      <p className="mt-3 flex flex-wrap gap-3 no-print">
+        <ButtonLink href={compareHref([device.slug])}>Compare this page</ButtonLink>
+        <ButtonLink look="quiet" href={`/light?with=${device.slug}`}>
+          See it in your light
+        </ButtonLink>
       </p>
       {edition.number < latest && (
         <Notice className="mt-4 max-w-[60ch]">
@@ -48,7 +56,9 @@ export function Heading({
         </Notice>
       )}
       {device.onSale === false && (
-        <Notice className="mt-4 max-w-[60ch]">Not on sale when this edition was released, so it has no price.</Notice>
+        <Notice className="mt-4 max-w-[60ch]">
+          Not on sale when this edition was released, so the edition gives no price; prices seen before stand below.
+        </Notice>
       )}
     </header>
   )

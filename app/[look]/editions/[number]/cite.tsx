@@ -1,4 +1,5 @@
 import Link from 'next/link'
+import { TextToCopy } from '@/components/text-to-copy'
 import { Disclosure } from '@/components/ui/disclosure'
 import { LICENCE } from '@/lib/dataset/about'
 import { datasetCitations } from '@/lib/dataset/citation-files'
@@ -14,10 +15,10 @@ export function Cite({ edition }: { edition: Edition }) {
       <h2 id="cite">Cite and use it</h2>
       <p className="mt-3 max-w-[68ch] wrap-anywhere">{text}</p>
       <Disclosure summary="As BibTeX" className="mt-2">
-        <Source label="Citation as BibTeX" text={bibtex} />
+        <TextToCopy label="Citation as BibTeX" text={bibtex} />
       </Disclosure>
       <Disclosure summary="As CITATION.cff">
-        <Source label="Citation as CITATION.cff" text={cff} />
+        <TextToCopy label="Citation as CITATION.cff" text={cff} />
       </Disclosure>
       <p className="mt-4 max-w-[68ch]">
         The data is under <a href={LICENCE.url}>{LICENCE.title}</a>: use it as you like, and say where it is from and
@@ -28,19 +29,6 @@ export function Cite({ edition }: { edition: Edition }) {
         </Link>
         .
       </p>
-    </section>
-  )
-}
-
-function Source({ label, text }: { label: string; text: string }) {
-  return (
-    <section
-      className="card mt-1 mb-3 max-w-200 overflow-x-auto p-4"
-      aria-label={label}
-      // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls sideways must be reachable by keyboard
-      tabIndex={0}
-    >
-      <pre className="text-small">{text}</pre>
     </section>
   )
 }

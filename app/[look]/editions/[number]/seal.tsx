@@ -1,3 +1,4 @@
+import { TextToCopy } from '@/components/text-to-copy'
 import { documentHash } from '@/lib/edition/seal'
 import type { Edition } from '@/lib/method/types'
 import { siteUrl } from '@/lib/server/site-url'
@@ -24,14 +25,7 @@ export function Seal({ edition }: { edition: Edition }) {
           : 'Worked out again when this page was made, it is not the same: do not rely on this edition, and please tell us.'}{' '}
         To check a copy of your own:
       </p>
-      <section
-        className="card mt-3 max-w-200 overflow-x-auto p-4"
-        aria-label="Command that checks the seal"
-        // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls sideways must be reachable by keyboard
-        tabIndex={0}
-      >
-        <pre className="text-small">{recipe(siteUrl(`/api/v1/editions/${edition.number}`))}</pre>
-      </section>
+      <TextToCopy label="Command that checks the seal" text={recipe(siteUrl(`/api/v1/editions/${edition.number}`))} />
       <p className="mt-3 max-w-[68ch] text-soft">
         It prints True where the seal fits. A seal says that a document is the one we released; it cannot say that the
         figures in it are right.

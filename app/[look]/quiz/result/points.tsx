@@ -47,6 +47,12 @@ export function Points({
           what is left.
         </p>
       )}
+      {paging && pages > 1 && (
+        <p className="hidden print:mt-1 print:block">
+          Page {formatNumber(Math.min(paging.page, pages))} of {formatNumber(pages)} of {formatNumber(ranked.size)}{' '}
+          devices; add page=all to the address for all of them.
+        </p>
+      )}
       {paging && (
         <p className="mt-2 print:hidden">
           <Link href={onPage('all')} prefetch={false}>

@@ -4,6 +4,7 @@ import { type DeviceListAnswer, deviceListQuery } from '@/lib/contract/device-li
 import { fieldErrors, problem } from '@/lib/contract/problem'
 import { clip } from '@/lib/contract/shown'
 import type { Edition } from '@/lib/method/types'
+import { pageLinks } from '../../page-links'
 import { CHANGING, storedJson } from '../../stored-json'
 
 /** The devices of an edition that a request asks for, one page of them, or the problem that names what is wrong. */
@@ -39,25 +40,9 @@ export function listAnswer(request: Request, edition: Edition): Response {
   }
   const body = JSON.stringify(answer)
   const response = storedJson(request, body, createHash('sha256').update(body).digest('hex'), CHANGING)
-  const links = pageLinks(searchParams, page, pages)
+  const links = pageLinks('/api/v1/devices', searchParams, page, pages)
   if (links) response.headers.set('link', links)
   return response
 }
 
 const refuse = (errors: { field: string; message: string }[]) => problem(400, 'The filter is not understood', errors)
-
-/** The pages before and after this one and at both ends, as Web Linking writes them (RFC 8288). Empty for a single page. */
-function pageLinks(asked: URLSearchParams, page: number, pages: number): string {
-  if (pages === 1 && page === 1) return ''
-  const link = (wanted: number, rel: string) => {
-    const search = new URLSearchParams(asked)
-    search.set('page', String(wanted))
-    return `</api/v1/devices?${search}>; rel="${rel}"`
-  }
-  return [
-    link(1, 'first'),
-    ...(page > 1 ? [link(Math.min(page - 1, pages), 'prev')] : []),
-    ...(page < pages ? [link(page + 1, 'next')] : []),
-    link(pages, 'last'),
-  ].join(', ')
-}
