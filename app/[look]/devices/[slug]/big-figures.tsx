@@ -72,7 +72,7 @@ function Big({
         <Link
           href={`/method#q-${id}`}
           prefetch={false}
-          className="inline-flex min-h-11 items-center text-soft md:min-h-6"
+          className="inline-block py-2.5 text-soft md:py-0.5"
         >
           {name}
         </Link>
