@@ -69,11 +69,7 @@ function Big({
   return (
     <div>
       <dt className="text-note text-soft">
-        <Link
-          href={`/method#q-${id}`}
-          prefetch={false}
-          className="inline-block py-2.5 text-soft md:py-0.5"
-        >
+        <Link href={`/method#q-${id}`} prefetch={false} className="inline-block py-2.5 text-soft md:py-0.5">
           {name}
         </Link>
       </dt>

@@ -31,7 +31,7 @@ export default async function Page({ params }) {
         </table>
       </details>
       <p>
-        <label htmlFor="field">A field</label> <input id="field" /> <a href="/pad/0">A link</a>
+        <label htmlFor="field">A field</label> <input id="field" /> <a href="/pad/0">The shortest page</a>
       </p>
       {paragraphs.map((i) => (
         <p key={i}>{all.slice(i * each, (i + 1) * each).join(' ')}</p>
