@@ -45,7 +45,7 @@ const config: NextConfig = {
   images: { unoptimized: true },
   serverExternalPackages: ['postgres', 'piscina'],
   // Finished pages live in the process: on disk they would outlive it, and belong to whichever database it served.
-  experimental: { isrFlushToDisk: false, inlineCss: true },
+  experimental: { isrFlushToDisk: false },
   cacheMaxMemorySize: 128 * 1024 * 1024,
   cacheHandler: development ? undefined : fileURLToPath(new URL('./lib/page-cache.mjs', import.meta.url)),
   async headers() {

@@ -11,7 +11,7 @@ export function SamePage({ edition }: { edition: Edition }) {
   const [lightest, darkest] = [byLightness[0], byLightness.at(-1)]
   if (!lightest || !darkest || lightest === darkest) return null
   return (
-    <section aria-labelledby="same-page" className="measure mt-14 grid gap-x-12 gap-y-6 lg:grid-cols-[1fr_1.6fr]">
+    <section aria-labelledby="same-page" className="later measure mt-14 grid gap-x-12 gap-y-6 lg:grid-cols-[1fr_1.6fr]">
       <div>
         <h2 id="same-page">Same page, different light</h2>
         <p className="mt-3">

@@ -4,7 +4,7 @@ import { READERS } from '@/lib/readers/readers'
 /** Eight typical readers, each a line and a way to the picks for them. */
 export function TypicalReaders() {
   return (
-    <section aria-labelledby="typical-readers" className="measure mt-14">
+    <section aria-labelledby="typical-readers" className="later measure mt-14">
       <h2 id="typical-readers">Do you read like one of these?</h2>
       <p className="mt-3 max-w-[68ch] text-soft">
         Eight sets of answers, ranked by the same method as yours would be. Start from the nearest, and change what
