@@ -14,6 +14,7 @@ const SOURCES = [
   'scripts/build-worker.mjs',
   'instrumentation.ts',
   'next.config.ts',
+  'proxy.ts',
 ]
 const SETTINGS = ['package-lock.json', 'postcss.config.mjs', 'tsconfig.json']
 
