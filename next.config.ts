@@ -2,21 +2,14 @@ import { fileURLToPath } from 'node:url'
 import type { NextConfig } from 'next'
 import { CATALOGUE_KEYS } from './lib/catalogue/keys'
 import { DEFAULT_LOOK, LOOK_COOKIE, LOOKS, lookName } from './lib/look'
-import { contentSecurityPolicy } from './lib/page-policy.mjs'
+import { SECURITY_HEADERS } from './lib/page-policy.mjs'
 
 /** Pages named *.specimen.tsx are for those who build the site; a production build does not contain them. */
 const development = process.env.NODE_ENV !== 'production'
 const withSpecimen = development || process.env.LAMPLEAF_SPECIMEN === '1'
 
-/** Headers every answer carries. A page brings a policy that knows its scripts; whatever does not may run none inline. */
-const securityHeaders = [
-  ...(development ? [] : [{ key: 'Content-Security-Policy', value: contentSecurityPolicy() }]),
-  { key: 'X-Content-Type-Options', value: 'nosniff' },
-  { key: 'Referrer-Policy', value: 'strict-origin-when-cross-origin' },
-  { key: 'X-Frame-Options', value: 'DENY' },
-  { key: 'Permissions-Policy', value: 'camera=(), microphone=(), geolocation=(), payment=()' },
-  { key: 'Cross-Origin-Opener-Policy', value: 'same-origin' },
-]
+/** In development React evaluates text, which the policy forbids. */
+const securityHeaders = SECURITY_HEADERS.filter(({ key }) => !development || key !== 'Content-Security-Policy')
 
 const anyLook = LOOKS.map(lookName).join('|')
 /** Every address of a page: not a file, a machine's address, or one that already names a look. */

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto'
+import { matchesTag } from '@/lib/serving/match-tag.mjs'
 import { notModified } from './api/conditions'
-import { matchesTag } from './api/match-tag'
 
 /**
  * A document that changes now and then, with both validators: who has it already is answered with 304. A tag decides

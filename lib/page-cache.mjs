@@ -7,8 +7,8 @@ const Base = FileSystemCache.default ?? FileSystemCache
 const NOT_HERE = /\/not-here$/
 
 /**
- * Next's own cache of finished pages, in memory, with the policy of each page beside it: the hashes of its inline scripts are
- * worked out once, when the page is made, and sent with every answer from the cache.
+ * Next's own cache of finished pages, in memory, with the policy of each page beside it: the hashes of its inline
+ * scripts are worked out once, when the page is made, and sent with every answer from the cache.
  */
 export default class PageCache extends Base {
   async set(key, value, context) {

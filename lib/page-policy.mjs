@@ -25,6 +25,19 @@ export function contentSecurityPolicy(scripts = []) {
   return [`script-src ${["'self'", ...scripts].join(' ')}`, ...REST].join('; ')
 }
 
+/**
+ * Headers every answer carries. A page brings a policy that knows its scripts; whatever does not may run none inline.
+ * @type {readonly { key: string, value: string }[]}
+ */
+export const SECURITY_HEADERS = [
+  { key: 'Content-Security-Policy', value: contentSecurityPolicy() },
+  { key: 'X-Content-Type-Options', value: 'nosniff' },
+  { key: 'Referrer-Policy', value: 'strict-origin-when-cross-origin' },
+  { key: 'X-Frame-Options', value: 'DENY' },
+  { key: 'Permissions-Policy', value: 'camera=(), microphone=(), geolocation=(), payment=()' },
+  { key: 'Cross-Origin-Opener-Policy', value: 'same-origin' },
+]
+
 /** A data block, such as structured data, is never executed and needs no permission (HTML standard, 4.12.1). */
 const isData = (attributes) => /\stype="(?!module"|text\/javascript")/.test(attributes)
 

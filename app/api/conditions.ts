@@ -1,4 +1,4 @@
-import { matchesTag } from './match-tag'
+import { matchesTag } from '@/lib/serving/match-tag.mjs'
 
 /** What is known of a file: its strong tag with quotes, and when it came to be. */
 export type Entity = { tag: string; modified: Date }

@@ -1,4 +1,4 @@
-import { matchesTag } from './match-tag'
+import { matchesTag } from '@/lib/serving/match-tag.mjs'
 
 /**
  * A JSON document with a strong validator, answered with 304 where the asker has it already (RFC 9110, 13.1.2).

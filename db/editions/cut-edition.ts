@@ -34,7 +34,8 @@ export type Cut = {
 
 /**
  * Cuts and releases the next edition: works every figure out from the readings, freezes document, entries, hash and the
- * files of its data set in one transaction. Of each device the newest revision with sets of both states counts; a device without is left out.
+ * files of its data set in one transaction. Of each device the newest revision with sets of both states counts; a
+ * device without is left out.
  * @returns the released document
  * @throws Error where nothing counts yet: no device, or no control of a kind the figures rest on
  */

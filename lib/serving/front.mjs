@@ -2,7 +2,7 @@ import { LRUCache } from 'lru-cache'
 import { capture } from './capture.mjs'
 import { outageSince } from './outage.mjs'
 import { sendOutagePage } from './outage-page.mjs'
-import { isPagePath, isPageRequest, storeKey } from './page-address.mjs'
+import { asksForPage, isPageAddress, storeKey } from './page-address.mjs'
 import { isForEverybody, sendPage } from './page-store.mjs'
 import { screen } from './screen.mjs'
 
@@ -18,8 +18,8 @@ export function frontOf(site, store) {
 
   return (request, response) => {
     if (screen(request, response)) return
-    if (!isPagePath((request.url ?? '').split('?')[0])) return site(request, response)
-    if (!isPageRequest(request)) {
+    if (!isPageAddress(request)) return site(request, response)
+    if (!asksForPage(request)) {
       capture(response, () => varyByLook(response))
       return site(request, response)
     }
@@ -44,8 +44,7 @@ export function frontOf(site, store) {
     capture(response, decide, async (answer) => {
       if (encodings !== undefined) request.headers['accept-encoding'] = encodings
       if (failed(answer.status)) return page ? sendPage(page, request, response) : sendOutagePage(response)
-      const kept = await store.keep(key, answer)
-      if (kept) sendPage(kept, request, response)
+      sendPage(await store.keep(key, answer), request, response)
     })
     site(request, response)
   }

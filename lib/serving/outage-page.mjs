@@ -1,4 +1,4 @@
-import { contentSecurityPolicy } from '../page-policy.mjs'
+import { answerOurselves } from './answer-ourselves.mjs'
 
 const STYLE =
   'body{margin:0;font:1.125rem/1.5 system-ui,sans-serif;background:#f4f6f5;color:#14211c}main{max-width:38rem;margin:0 auto;padding:4rem 1.25rem}h1{font:600 2rem/1.15 Georgia,serif}a{color:#0d5a43}@media(prefers-color-scheme:dark){body{background:#0f1a16;color:#e8efeb}a{color:#62c3a0}}'
@@ -27,17 +27,8 @@ const RETRY_AFTER = 30
 
 /** Answers a page request while something behind the site is away (RFC 9110, 15.6.4). It needs no script and no file. */
 export function sendOutagePage(response) {
-  for (const name of response.getHeaderNames()) response.removeHeader(name)
-  const body = Buffer.from(HTML)
-  response.writeHead(503, {
+  answerOurselves(response, 503, HTML, {
     'Content-Type': 'text/html; charset=utf-8',
-    'Content-Length': body.length,
-    'Cache-Control': 'no-store',
     'Retry-After': String(RETRY_AFTER),
-    'Content-Security-Policy': contentSecurityPolicy(),
-    'X-Content-Type-Options': 'nosniff',
-    'X-Frame-Options': 'DENY',
-    'Referrer-Policy': 'strict-origin-when-cross-origin',
   })
-  response.end(response.req?.method === 'HEAD' ? undefined : body)
 }

@@ -3,6 +3,7 @@ import { promisify } from 'node:util'
 import { brotliCompress, constants, gzip } from 'node:zlib'
 import { LRUCache } from 'lru-cache'
 import Negotiator from 'negotiator'
+import { matchesTag } from './match-tag.mjs'
 
 /** House: how long a stored page is given out before the site is asked for it again, milliseconds. */
 const FRESH_MS = 5000
@@ -29,20 +30,20 @@ export function createPageStore({ now = Date.now, freshMs = FRESH_MS } = {}) {
     find(key) {
       const page = pages.get(key)
       if (!page) return { page: null, due: true }
-      const due = now() - page.storedAt > freshMs && now() - page.askedAt > freshMs
+      const due = now() - page.askedAt > freshMs
       if (due) page.askedAt = now()
       return { page, due }
     },
+    /** Keeps an answer that is for everybody, squeezed, and gives it back as a stored page. */
     async keep(key, { status, headers, body }) {
-      if (!isForEverybody(status, headers)) return null
       const [gz, br] = await Promise.all([toGzip(body), toBrotli(body, QUALITY)])
       const page = {
         status,
         headers: Object.fromEntries(Object.entries(headers).filter(([name]) => !NOT_THE_PAGES.test(name))),
         bodies: { identity: body, gzip: gz, br },
-        etag: `W/"${createHash('sha256').update(body).digest('base64url').slice(0, 27)}"`,
+        tag: `"${createHash('sha256').update(body).digest('base64url').slice(0, 27)}"`,
         bytes: body.length + gz.length + br.length,
-        storedAt: now(),
+        /** When the site was last asked for it. */
         askedAt: now(),
       }
       pages.set(key, page)
@@ -63,8 +64,9 @@ export function sendPage(page, request, response) {
   const encoding =
     new Negotiator(request).encoding(['br', 'gzip', 'identity'], { preferred: ['br', 'gzip'] }) ?? 'identity'
   for (const [name, value] of Object.entries(page.headers)) response.setHeader(name, value)
-  response.setHeader('ETag', page.etag)
-  if (page.status === 200 && knows(request.headers['if-none-match'], page.etag)) {
+  // Weak: each encoding has other bytes of the same page.
+  response.setHeader('ETag', `W/${page.tag}`)
+  if (page.status === 200 && matchesTag(request.headers['if-none-match'], page.tag)) {
     response.writeHead(304)
     return response.end()
   }
@@ -72,11 +74,4 @@ export function sendPage(page, request, response) {
   if (encoding !== 'identity') response.setHeader('Content-Encoding', encoding)
   response.writeHead(page.status, { 'Content-Length': body.length })
   return response.end(request.method === 'HEAD' ? undefined : body)
-}
-
-/** RFC 9110, 13.1.2: any tag of the list, compared weakly, or `*`. */
-function knows(list, etag) {
-  if (typeof list !== 'string') return false
-  const bare = (tag) => tag.trim().replace(/^W\//, '')
-  return list.trim() === '*' || list.split(',').some((tag) => bare(tag) === bare(etag))
 }

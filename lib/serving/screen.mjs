@@ -1,3 +1,5 @@
+import { answerOurselves } from './answer-ourselves.mjs'
+
 /** What our web process answers to; anything else is turned away before it reaches a page. */
 const METHODS = new Set(['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS'])
 
@@ -13,8 +15,7 @@ const INTERNAL =
  */
 export function screen(request, response) {
   if (!METHODS.has(request.method ?? '')) {
-    response.setHeader('Allow', [...METHODS].join(', '))
-    refuse(response, 405, 'This method is not answered here.')
+    refuse(response, 405, 'This method is not answered here.', { Allow: [...METHODS].join(', ') })
     return true
   }
   if (!isReadable(request.url ?? '')) {
@@ -29,6 +30,9 @@ export function screen(request, response) {
   return false
 }
 
+const refuse = (response, status, message, headers = {}) =>
+  answerOurselves(response, status, `${message}\n`, { 'Content-Type': 'text/plain; charset=utf-8', ...headers })
+
 function isReadable(url) {
   try {
     decodeURIComponent(url.split('?')[0])
@@ -36,9 +40,4 @@ function isReadable(url) {
   } catch {
     return false
   }
-}
-
-function refuse(response, status, message) {
-  response.writeHead(status, { 'Content-Type': 'text/plain; charset=utf-8', 'Cache-Control': 'no-store' })
-  response.end(`${message}\n`)
 }

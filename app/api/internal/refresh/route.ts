@@ -11,16 +11,16 @@ export const dynamic = 'force-dynamic'
 let shown: string | null = null
 
 /**
- * For this process alone: whether anything the pages show has changed since the last look, and the public pages. Every
- * stored page is marked old when something has; each is made anew when it is next asked for.
+ * For this process alone: whether anything the pages show has changed since the last look, and if so the public pages.
+ * Every stored page is marked old then; each is made anew when it is next asked for.
  */
 export async function POST(request: Request): Promise<Response> {
   if (!isOwnProcess(request.headers.get(OWN_PROCESS_HEADER))) return new Response(null, { status: 404 })
-  const [edition, changes] = [await latestEdition(), await read(findPageChanges)]
-  const pages = publicPages(edition, changes)
+  const [edition, changes] = await Promise.all([latestEdition(), read(findPageChanges)])
   const now = JSON.stringify([edition?.number, changes.editions, changes.corrections, ...changes.devices])
   const changed = now !== shown
   if (changed && shown !== null) revalidatePath('/', 'layout')
   shown = now
-  return Response.json({ changed, paths: pages.map(({ path }) => path) }, { headers: { 'Cache-Control': 'no-store' } })
+  const paths = changed ? publicPages(edition, changes).map(({ path }) => path) : []
+  return Response.json({ changed, paths }, { headers: { 'Cache-Control': 'no-store' } })
 }

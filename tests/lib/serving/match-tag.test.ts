@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import { matchesTag } from '@/app/api/match-tag'
+import { matchesTag } from '@/lib/serving/match-tag.mjs'
 
 // RFC 9110, section 13.1.2 (If-None-Match) and the table of section 8.8.3.2 (weak comparison).
 describe('If-None-Match names the document', () => {
