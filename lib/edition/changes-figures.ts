@@ -1,3 +1,4 @@
+import { DECIMALS } from '@/lib/findings/decimals'
 import { differenceDoubt, type Quantity } from '@/lib/findings/difference'
 import { derive } from '@/lib/method/derived-figures'
 import type { Edition, EditionDevice, Lab } from '@/lib/method/types'
@@ -20,35 +21,35 @@ export const COMPARED: Record<FigureName, Compared> = {
   lightness: {
     name: 'Lightness of the page',
     symbol: { base: 'L*' },
-    decimals: 1,
+    decimals: DECIMALS.lightness,
     value: ({ page }) => page.L,
     quantity: ({ page }) => page.L,
   },
   a: {
     name: 'Green to red of the page',
     symbol: { base: 'a*' },
-    decimals: 1,
+    decimals: DECIMALS.a,
     value: ({ page }) => page.a,
     quantity: ({ page }) => page.a,
   },
   b: {
     name: 'Blue to yellow of the page',
     symbol: { base: 'b*' },
-    decimals: 1,
+    decimals: DECIMALS.b,
     value: ({ page }) => page.b,
     quantity: ({ page }) => page.b,
   },
   ink: {
     name: 'Lightness of the ink',
     symbol: { base: 'L*' },
-    decimals: 1,
+    decimals: DECIMALS.lightness,
     value: ({ ink }) => ink.L,
     quantity: ({ ink }) => ink.L,
   },
   whiteness: {
     name: 'Whiteness',
     symbol: { base: 'W', sub: '10' },
-    decimals: 0,
+    decimals: DECIMALS.whiteness,
     dagger: true,
     value: ({ whiteness }) => whiteness,
     quantity: ({ page, ink }) => derive(page, ink).whiteness,
@@ -56,7 +57,7 @@ export const COMPARED: Record<FigureName, Compared> = {
   tint: {
     name: 'Tint',
     symbol: { base: 'T', sub: '10' },
-    decimals: 1,
+    decimals: DECIMALS.tint,
     dagger: true,
     value: ({ tint }) => tint,
     quantity: ({ page, ink }) => derive(page, ink).tint,
@@ -64,7 +65,7 @@ export const COMPARED: Record<FigureName, Compared> = {
   contrast: {
     name: 'Contrast ratio',
     symbol: null,
-    decimals: 1,
+    decimals: DECIMALS.contrast,
     value: ({ contrast }) => contrast,
     quantity: ({ page, ink }) => derive(page, ink).contrast,
   },

@@ -4,6 +4,7 @@ import { formatMoney } from '@/lib/format/money'
 import { formatDoubt, formatExact, formatNumber, formatUnit } from '@/lib/format/number'
 import type { Units } from '@/lib/look'
 import type { EditionDevice } from '@/lib/method/types'
+import { SAME_FIT } from '@/lib/quiz/thresholds'
 import type { DeviceChange } from './changes'
 import { FACT_NAMES, type FactName } from './changes-facts'
 import { COMPARED, type MovedFigure } from './changes-figures'
@@ -62,8 +63,6 @@ function fewest(from: number, enough: (decimals: number) => boolean): number {
   return decimals
 }
 
-/** House: points of fit below which a fit counts as the same. */
-const SAME_FIT = 0.05
 const MOST_NAMED = 4
 
 /**

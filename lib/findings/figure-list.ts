@@ -1,3 +1,4 @@
+import { DECIMALS } from './decimals'
 import type { Figure, PublishedFigures } from './published'
 
 /** A published figure with what one must know to print it. */
@@ -25,17 +26,29 @@ export function figureList(figures: PublishedFigures): ListedFigure[] {
     outside = false,
   ): ListedFigure => ({ method, name, figure, unit, decimals, outside })
   return [
-    listed('lightness', 'Lightness L* of the page', lightness, 'CIELAB', 1),
-    listed('a-b', 'a* of the page, − green to + red', a, 'CIELAB', 1),
-    listed('a-b', 'b* of the page, − blue to + yellow', b, 'CIELAB', 1),
-    listed('whiteness', 'CIE whiteness W10 of the page', whiteness, 'dimensionless', 0, !withinLimits),
-    listed('tint', 'CIE tint T10 of the page', tint, 'dimensionless', 1, !withinLimits),
-    listed('chroma', 'Chroma C*ab of the page', chroma, 'CIELAB', 1),
-    ...(hue ? [listed('chroma', 'Hue angle of the page', hue, 'degrees', 0)] : []),
-    listed('contrast', 'Contrast of page to ink', contrast, 'to 1', 1),
-    listed('luminance-factor', 'Luminance factor Y of the page', yPage, '%', 1),
-    listed('luminance-factor', 'Luminance factor Y of the ink', yInk, '%', 1),
-    listed('difference', 'Colour difference ΔE00 from the control paper', figures.fromPaper, 'CIEDE2000', 1),
-    listed('light-needed', 'Light needed for the control paper’s lightness', figures.timesTheLight, 'times', 2),
+    listed('lightness', 'Lightness L* of the page', lightness, 'CIELAB', DECIMALS.lightness),
+    listed('a-b', 'a* of the page, − green to + red', a, 'CIELAB', DECIMALS.a),
+    listed('a-b', 'b* of the page, − blue to + yellow', b, 'CIELAB', DECIMALS.b),
+    listed('whiteness', 'CIE whiteness W10 of the page', whiteness, 'dimensionless', DECIMALS.whiteness, !withinLimits),
+    listed('tint', 'CIE tint T10 of the page', tint, 'dimensionless', DECIMALS.tint, !withinLimits),
+    listed('chroma', 'Chroma C*ab of the page', chroma, 'CIELAB', DECIMALS.chroma),
+    ...(hue ? [listed('chroma', 'Hue angle of the page', hue, 'degrees', DECIMALS.hue)] : []),
+    listed('contrast', 'Contrast of page to ink', contrast, 'to 1', DECIMALS.contrast),
+    listed('luminance-factor', 'Luminance factor Y of the page', yPage, '%', DECIMALS.y),
+    listed('luminance-factor', 'Luminance factor Y of the ink', yInk, '%', DECIMALS.y),
+    listed(
+      'difference',
+      'Colour difference ΔE00 from the control paper',
+      figures.fromPaper,
+      'CIEDE2000',
+      DECIMALS.difference,
+    ),
+    listed(
+      'light-needed',
+      'Light needed for the control paper’s lightness',
+      figures.timesTheLight,
+      'times',
+      DECIMALS.times,
+    ),
   ]
 }

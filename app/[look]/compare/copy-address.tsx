@@ -1,24 +1,14 @@
 'use client'
 
-import { useState } from 'react'
 import { Button } from '@/components/ui/button'
+import { useCopying } from '@/components/use-copying'
 
 /** Copies an address that stands in a field beside it, from where it can also be copied by hand. */
 export function CopyAddress({ address }: { address: string }) {
-  const [outcome, setOutcome] = useState<'copied' | 'refused' | null>(null)
-
-  async function copy() {
-    try {
-      await navigator.clipboard.writeText(address)
-      setOutcome('copied')
-    } catch {
-      setOutcome('refused')
-    }
-  }
-
+  const [outcome, copy] = useCopying()
   return (
     <div className="noscript:hidden">
-      <Button look="quiet" onClick={copy}>
+      <Button look="quiet" onClick={() => copy(address)}>
         Copy link
       </Button>
       <p role="status" className="text-note text-soft">

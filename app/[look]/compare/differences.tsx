@@ -3,8 +3,8 @@ import type { ReactNode } from 'react'
 import { type Column, Table } from '@/components/ui/table'
 import type { Compared, Difference, PairDifferences } from '@/lib/compare/differences'
 import { SEEN, SMALLEST_STEP, seenWords } from '@/lib/compare/seen'
+import { DECIMALS } from '@/lib/findings/decimals'
 import { formatDoubt, formatNumber, THIN_SPACE } from '@/lib/format/number'
-import { DECIMALS } from '../devices/figure'
 
 /** How the pages differ, pair by pair: in words first, then each difference with its doubt. */
 export function Differences({ pairs }: { pairs: readonly PairDifferences[] }) {

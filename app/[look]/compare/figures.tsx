@@ -1,8 +1,9 @@
 import { type Column, Table } from '@/components/ui/table'
+import { DECIMALS } from '@/lib/findings/decimals'
 import { type PublishedFigures, publishedFigures } from '@/lib/findings/published'
 import { THIN_SPACE } from '@/lib/format/number'
 import type { Edition, EditionDevice } from '@/lib/method/types'
-import { DECIMALS, FigureText } from '../devices/figure'
+import { FigureText } from '../devices/figure'
 
 type Key = 'lightness' | 'whiteness' | 'tint' | 'chroma' | 'contrast'
 const ROWS: { key: Key; name: string }[] = [

@@ -29,19 +29,6 @@ export function Dagger() {
   )
 }
 
-/** Decimals of the published figures: never finer than their doubt. */
-export const DECIMALS = {
-  lightness: 1,
-  whiteness: 0,
-  tint: 1,
-  chroma: 1,
-  contrast: 1,
-  y: 1,
-  hue: 0,
-  difference: 1,
-  times: 2,
-}
-
 /** What is not known is said, never left empty. */
 export function NotStated() {
   return <span className="text-soft italic">not stated</span>

@@ -1,9 +1,10 @@
 import Link from 'next/link'
 import type { ReactNode } from 'react'
+import { DECIMALS } from '@/lib/findings/decimals'
 import type { Figure, PublishedFigures } from '@/lib/findings/published'
 import type { Standing } from '@/lib/findings/standing'
 import { formatDoubt, formatNumber, formatOrdinal } from '@/lib/format/number'
-import { Dagger, DECIMALS } from '../figure'
+import { Dagger } from '../figure'
 
 /** The four figures a reader comes for, each with its doubt and a plain word on what it means. */
 export function BigFigures({ figures, standing }: { figures: PublishedFigures; standing: Standing }) {

@@ -4,9 +4,10 @@ import { type Column, Table } from '@/components/ui/table'
 import type { DeviceEntry, DeviceRecord } from '@/db/queries/devices'
 import type { MovedFigure } from '@/lib/edition/changes-figures'
 import { movedWords } from '@/lib/edition/changes-words'
+import { DECIMALS } from '@/lib/findings/decimals'
 import { type HistoryRow, historyOf } from '@/lib/findings/history'
 import { formatDay } from '@/lib/format/date'
-import { DECIMALS, FigureText } from '../figure'
+import { FigureText } from '../figure'
 import { correctionHref } from './corrections'
 
 type Row = HistoryRow & { publishedAt: Date }

@@ -2,12 +2,12 @@ import Link from 'next/link'
 import { Ladder } from '@/components/charts/ladder'
 import { READING_BANDS } from '@/components/reading-bands'
 import { lightnessToY } from '@/lib/colour/lab'
+import { DECIMALS } from '@/lib/findings/decimals'
 import { ladderPoints } from '@/lib/findings/ladder'
 import type { PublishedFigures } from '@/lib/findings/published'
 import { formatDoubt, formatNumber } from '@/lib/format/number'
 import type { EditionDevice } from '@/lib/method/types'
 import { PRINT_LIGHTNESS } from '@/lib/quiz/in-light'
-import { DECIMALS } from '../figure'
 
 const Y_PRINT = lightnessToY(PRINT_LIGHTNESS)
 

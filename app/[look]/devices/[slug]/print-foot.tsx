@@ -1,9 +1,9 @@
 import type { DeviceEntry, DeviceRecord } from '@/db/queries/devices'
+import { DECIMALS } from '@/lib/findings/decimals'
 import type { Figure } from '@/lib/findings/published'
 import { formatDay } from '@/lib/format/date'
 import { formatDoubt, formatNumber } from '@/lib/format/number'
 import type { Units } from '@/lib/look'
-import { DECIMALS } from '../figure'
 import { newestSpecs } from './dossier'
 import { FACT_NAMES, stated } from './facts'
 

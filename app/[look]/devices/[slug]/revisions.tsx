@@ -1,11 +1,12 @@
 import { Booth } from '@/components/booth'
 import { type Column, Table } from '@/components/ui/table'
 import type { DeviceEntry, DeviceRecord } from '@/db/queries/devices'
+import { DECIMALS } from '@/lib/findings/decimals'
 import { differenceDoubt, withinDoubt } from '@/lib/findings/difference'
 import { publishedFigures } from '@/lib/findings/published'
 import { formatDay } from '@/lib/format/date'
 import { formatDoubt, formatNumber } from '@/lib/format/number'
-import { DECIMALS, FigureText, NotStated } from '../figure'
+import { FigureText, NotStated } from '../figure'
 
 type Revision = DeviceRecord['revisions'][number]
 type Row = { revision: Revision; entry: DeviceEntry | null; isShown: boolean }

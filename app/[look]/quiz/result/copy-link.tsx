@@ -1,24 +1,14 @@
 'use client'
 
-import { useState } from 'react'
 import { Button } from '@/components/ui/button'
+import { useCopying } from '@/components/use-copying'
 
 /** Copies the address, which holds every answer. Where the browser refuses, the address is shown to be copied by hand. */
 export function CopyLink() {
-  const [outcome, setOutcome] = useState<'copied' | 'refused' | null>(null)
-
-  async function copy() {
-    try {
-      await navigator.clipboard.writeText(window.location.href)
-      setOutcome('copied')
-    } catch {
-      setOutcome('refused')
-    }
-  }
-
+  const [outcome, copy] = useCopying()
   return (
     <div className="noscript:hidden">
-      <Button look="lamp" onClick={copy} className="w-full">
+      <Button look="lamp" onClick={() => copy(window.location.href)} className="w-full">
         Copy link
       </Button>
       <p role="status" className="mt-1 text-note text-soft">
