@@ -10,7 +10,8 @@ import { latestEdition } from './editions'
  * @param edition the edition it shows; null: none is released, and there is no picture
  */
 export function openGraphFor(path: `/${string}`, edition: Edition | null): Metadata['openGraph'] {
-  return { type: 'website', siteName: 'Lampleaf', locale: 'en_GB', url: path, images: ogImage(path, edition) }
+  // No url: the canonical link says it, and a page that only inherits the site's picture must not say the home page's.
+  return { type: 'website', siteName: 'Lampleaf', locale: 'en_GB', images: ogImage(path, edition) }
 }
 
 /**
