@@ -1,7 +1,12 @@
 import { answerOurselves } from './answer-ourselves.mjs'
+import { isPageAddress } from './page-address.mjs'
 
-/** What our web process answers to; anything else is turned away before it reaches a page. */
-const METHODS = new Set(['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS'])
+/** What our web process answers to; a handler may know fewer, and says so itself. */
+const METHODS = ['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS']
+/** Pages are read. Next would answer anything else with the whole page, as if it had done it. */
+const METHODS_OF_PAGES = ['GET', 'HEAD']
+/** No page: the form that chooses a look is posted here. */
+const LOOK_FORM = '/look'
 
 /** Headers that only our own layers may set: a request that brings them is trying something. */
 const INTERNAL =
@@ -14,8 +19,9 @@ const INTERNAL =
  * @returns {boolean} whether the request was answered here
  */
 export function screen(request, response) {
-  if (!METHODS.has(request.method ?? '')) {
-    refuse(response, 405, 'This method is not answered here.', { Allow: [...METHODS].join(', ') })
+  const methods = isPageAddress(request) && request.url !== LOOK_FORM ? METHODS_OF_PAGES : METHODS
+  if (!methods.includes(request.method ?? '')) {
+    refuse(response, 405, 'This method is not answered here.', { Allow: methods.join(', ') })
     return true
   }
   if (!isReadable(request.url ?? '')) {

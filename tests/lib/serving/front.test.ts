@@ -169,6 +169,18 @@ test('unknown methods, unreadable addresses and forged inner headers stop here',
   expect(Object.keys(seen).filter((name) => /^x-|^content-sec/.test(name))).toEqual([])
 })
 
+test('a page is read and nothing else; the form that chooses a look may be posted, and handlers judge for themselves', async () => {
+  const { site, asked } = counted((_, response) => response.writeHead(200, FOR_ALL).end('x'))
+  const port = await behindFront(site)
+  for (const method of ['POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS']) {
+    const answer = await ask(port, '/devices', {}, method)
+    expect([answer.status, answer.headers.allow]).toEqual([405, 'GET, HEAD'])
+  }
+  expect(asked).toEqual([])
+  expect((await ask(port, '/look', {}, 'POST')).status).toBe(200)
+  expect((await ask(port, '/api/v1/match', {}, 'POST')).status).toBe(200)
+})
+
 test('a reader who leaves half-way harms nobody', async () => {
   const port = await behindFront((_, response) => {
     setTimeout(() => response.writeHead(200, FOR_ALL).end(PAGE), 20)
