@@ -4,7 +4,7 @@ import type { JsonSchema } from './types'
 export type Field = { path: string; type: string; meaning: string; required: boolean }
 
 type Node = JsonSchema & {
-  type?: string
+  type?: string | string[]
   properties?: Record<string, Node>
   required?: string[]
   items?: Node
@@ -37,6 +37,7 @@ function inner(node: Node, path: string): Field[] {
 /** What a value may be, in words. */
 function typeOf(node: Node): string {
   if (node.anyOf) return node.anyOf.map(typeOf).join(' or ')
+  if (Array.isArray(node.type)) return node.type.map((type) => typeOf({ type })).join(' or ')
   if (node.const !== undefined) return JSON.stringify(node.const)
   if (node.enum) return node.enum.map((word) => JSON.stringify(word)).join(' or ')
   if (node.prefixItems) return `list of ${node.prefixItems.length}: ${node.prefixItems.map(typeOf).join(', ')}`

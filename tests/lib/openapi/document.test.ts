@@ -65,9 +65,12 @@ describe('the description of the API', () => {
     }
   })
 
-  test('says of every field what it means', () => {
+  test('says of every field what it means and what it may be', () => {
     for (const [name, schema] of Object.entries(SCHEMAS)) {
-      for (const { path, meaning } of fieldsOf(schema)) expect(meaning, `${name} ${path}`).toMatch(/\.$/)
+      for (const { path, meaning, type } of fieldsOf(schema)) {
+        expect(meaning, `${name} ${path}`).toMatch(/\.$/)
+        expect(type, `${name} ${path}`).not.toMatch(/\bany\b/)
+      }
     }
   })
 
