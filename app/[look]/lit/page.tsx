@@ -4,7 +4,7 @@ import { homeMetadata } from '../(home)/home-metadata'
 
 type Props = { searchParams: Promise<Record<string, string | string[] | undefined>> }
 
-export const generateMetadata = homeMetadata
+export const generateMetadata = () => homeMetadata({ index: false })
 
 /** The home page in a light its address asks for: what the lamp shows without JavaScript. */
 export default async function LitHomePage({ searchParams }: Props) {
